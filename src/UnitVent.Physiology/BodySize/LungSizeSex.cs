@@ -1,0 +1,11 @@
+namespace UnitVent.Physiology;
+
+/// <summary>The sex used for the lung-size formula. It says nothing else about the person.</summary>
+public enum LungSizeSex
+{
+    /// <summary>The formula's constant for women.</summary>
+    Female,
+
+    /// <summary>The formula's constant for men.</summary>
+    Male,
+}

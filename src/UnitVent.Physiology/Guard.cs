@@ -1,0 +1,26 @@
+using System.Globalization;
+using System.Runtime.CompilerServices;
+
+namespace UnitVent.Physiology;
+
+internal static class Guard
+{
+    /// <summary>The lower end of a range that excludes zero.</summary>
+    public const double JustAboveZero = double.Epsilon;
+
+    /// <summary>The upper end of a range that excludes one: the largest double below it.</summary>
+    public const double JustBelowOne = 1 - (1.0 / (1L << 53));
+
+    /// <summary>Returns <paramref name="value"/> when it lies in the closed range; NaN never does.</summary>
+    public static double InRange(
+        double value, double lowest, double highest, [CallerArgumentExpression(nameof(value))] string? name = null)
+    {
+        if (value >= lowest && value <= highest)
+        {
+            return value;
+        }
+
+        var message = string.Create(CultureInfo.InvariantCulture, $"{value} is outside [{lowest}, {highest}].");
+        throw new ArgumentOutOfRangeException(name, message);
+    }
+}
