@@ -1,0 +1,24 @@
+using NodaTime;
+
+namespace UnitVent.Charting.Pictures;
+
+/// <summary>One computed number: the value, or why it cannot be had, and how it was made. Unrounded.</summary>
+/// <param name="Name">Its name as the HTTP interface spells it.</param>
+/// <param name="Unit">Its unit; empty for pure numbers.</param>
+/// <param name="Value">The value; null unless the state is <see cref="ValueState.Ok"/> or <see cref="ValueState.Validity"/>.</param>
+/// <param name="State">How far it can be had.</param>
+/// <param name="Because">One sentence when the state is not <see cref="ValueState.Ok"/>; null otherwise.</param>
+/// <param name="Kind">Where it comes from.</param>
+/// <param name="Equation">The equation's id; empty for measured values.</param>
+/// <param name="AsOf">The time of its oldest timed input; null when it has none.</param>
+/// <param name="Inputs">What it was made from.</param>
+public sealed record PictureValue(
+    string Name,
+    string Unit,
+    double? Value,
+    ValueState State,
+    string? Because,
+    ValueKind Kind,
+    string Equation,
+    Instant? AsOf,
+    IReadOnlyList<Reading> Inputs);
