@@ -5,8 +5,8 @@ namespace UnitVent.Physiology;
 
 internal static class Guard
 {
-    /// <summary>The lower end of a range that excludes zero.</summary>
-    public const double JustAboveZero = double.Epsilon;
+    /// <summary>The lower end of a range that excludes zero: below anything readable, yet too large for a quotient to overflow.</summary>
+    public const double JustAboveZero = 1e-9;
 
     /// <summary>The upper end of a range that excludes one: the largest double below it.</summary>
     public const double JustBelowOne = 1 - (1.0 / (1L << 53));
@@ -23,4 +23,8 @@ internal static class Guard
         var message = string.Create(CultureInfo.InvariantCulture, $"{value} is outside [{lowest}, {highest}].");
         throw new ArgumentOutOfRangeException(name, message);
     }
+
+    /// <summary>Returns <paramref name="value"/> when it is above zero: fit to divide by or to take the logarithm of.</summary>
+    public static double Positive(double value, [CallerArgumentExpression(nameof(value))] string? name = null)
+        => InRange(value, JustAboveZero, double.MaxValue, name);
 }

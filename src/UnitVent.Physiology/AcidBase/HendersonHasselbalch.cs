@@ -20,11 +20,7 @@ public static class HendersonHasselbalch
     /// <summary>Computes pH: 6.105 + log10[HCO3 / (0.0307 × PCO2)].</summary>
     /// <exception cref="ArgumentOutOfRangeException">An argument is its default, 0.</exception>
     public static double PH(Bicarbonate bicarbonate, PartialPressure pCO2)
-    {
-        ArgumentOutOfRangeException.ThrowIfEqual(bicarbonate, default);
-
-        return PK + Math.Log10(bicarbonate.MmolPerLitre / DissolvedMmolPerLitre(pCO2));
-    }
+        => PK + Math.Log10(Guard.Positive(bicarbonate.MmolPerLitre, nameof(bicarbonate)) / DissolvedMmolPerLitre(pCO2));
 
     /// <summary>Computes the pH that follows from tension and bicarbonate, minus the pH typed; near 0 when the three fit together.</summary>
     /// <exception cref="ArgumentOutOfRangeException">An argument is its default, 0.</exception>
@@ -36,8 +32,5 @@ public static class HendersonHasselbalch
     }
 
     private static double DissolvedMmolPerLitre(PartialPressure pCO2)
-    {
-        ArgumentOutOfRangeException.ThrowIfEqual(pCO2, default);
-        return SolubilityMmolPerLitrePerMmHg * pCO2.MmHg;
-    }
+        => SolubilityMmolPerLitrePerMmHg * Guard.Positive(pCO2.MmHg, nameof(pCO2));
 }

@@ -16,7 +16,7 @@ public static class ExpiratoryTimeConstant
 
     /// <summary>Says whether <see cref="Compute"/> gives a value: a ratio inside (0, 1), a time above 0, a result of at most 60 s.</summary>
     public static bool IsDefined(BreathTime timeLow, double ratio)
-        => timeLow != default && ratio is > 0 and < 1 && DecaySeconds(timeLow, ratio) <= LongestSeconds;
+        => timeLow != default && ratio is >= Guard.JustAboveZero and <= Guard.JustBelowOne && DecaySeconds(timeLow, ratio) <= LongestSeconds;
 
     /// <summary>Computes the time constant: T low / ln(1/r).</summary>
     /// <exception cref="ArgumentOutOfRangeException">The value is not defined, see <see cref="IsDefined"/>.</exception>

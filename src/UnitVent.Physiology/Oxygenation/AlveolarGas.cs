@@ -33,11 +33,7 @@ public static class AlveolarGas
     /// <remarks>Source: Gilbert R, Keighley JF. Am Rev Respir Dis 1974;109:142-145 (citation from memory).</remarks>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="alveolar"/> is its default, 0 mmHg.</exception>
     public static double ArterialAlveolarRatio(PartialPressure alveolar, PartialPressure arterial)
-    {
-        ArgumentOutOfRangeException.ThrowIfEqual(alveolar, default);
-
-        return arterial.MmHg / alveolar.MmHg;
-    }
+        => arterial.MmHg / Guard.Positive(alveolar.MmHg, nameof(alveolar));
 
     private static double Evaluate(OxygenFraction fiO2, BarometricPressure barometric, PartialPressure paCO2)
     {

@@ -29,7 +29,7 @@ public static class OxygenDissociation
         var a = 11700 / ((1 / s) - 1);
         var b = Math.Sqrt((50 * 50 * 50) + (a * a));
         var larger = Math.Cbrt(b + a);
-        return PartialPressure.FromMmHg(larger - (50 * 50 / larger)); // (B + A)(B − A) = 50³, so the second root needs no subtraction
+        return PartialPressure.FromMmHg(larger - (50 / larger)); // (B + A)(B − A) = 50³, so the second root is 50 over the first
     }
 
     /// <summary>Computes the tension that has, on the standard curve, the saturation <paramref name="pO2"/> has under these conditions.</summary>

@@ -11,9 +11,8 @@ public static class OxygenationIndex
     public static double Compute(OxygenFraction fiO2, AirwayPressure mean, PartialPressure paO2)
     {
         ArgumentOutOfRangeException.ThrowIfEqual(fiO2, default);
-        ArgumentOutOfRangeException.ThrowIfEqual(paO2, default);
 
-        return 100 * fiO2.Fraction * mean.CmH2O / paO2.MmHg;
+        return 100 * fiO2.Fraction * mean.CmH2O / Guard.Positive(paO2.MmHg, nameof(paO2));
     }
 
     /// <summary>Computes OSI = 100 × FiO2 × mean airway pressure [cmH2O] / SpO2 [%].</summary>

@@ -12,11 +12,7 @@ public static class MeanPressureAgreement
     /// <summary>Computes the difference in percent of the computed pressure.</summary>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="computed"/> is not above 0 cmH2O.</exception>
     public static double DifferencePercent(AirwayPressure measured, AirwayPressure computed)
-    {
-        ArgumentOutOfRangeException.ThrowIfNegativeOrZero(computed.CmH2O, nameof(computed));
-
-        return 100 * DifferenceCmH2O(measured, computed) / computed.CmH2O;
-    }
+        => 100 * DifferenceCmH2O(measured, computed) / Guard.Positive(computed.CmH2O, nameof(computed));
 
     /// <summary>Says whether the two agree within the larger of 2 cmH2O and 10 %.</summary>
     /// <remarks>Source of the tolerance: common practice.</remarks>

@@ -33,9 +33,5 @@ public static class MinuteVentilationSplit
     /// <summary>Computes spontaneous / total in percent, zero or more; above 100 when the two readings contradict each other.</summary>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="total"/> is 0 L/min.</exception>
     public static double Share(MinuteVentilation spontaneous, MinuteVentilation total)
-    {
-        ArgumentOutOfRangeException.ThrowIfEqual(total, default);
-
-        return 100 * spontaneous.LitresPerMinute / total.LitresPerMinute;
-    }
+        => 100 * (spontaneous.LitresPerMinute / Guard.Positive(total.LitresPerMinute, nameof(total)));
 }

@@ -10,8 +10,7 @@ public static class RapidShallowBreathing
     public static double Compute(BreathRate rate, GasVolume tidal)
     {
         ArgumentOutOfRangeException.ThrowIfEqual(rate, default);
-        ArgumentOutOfRangeException.ThrowIfEqual(tidal, default);
 
-        return rate.PerMinute / tidal.Litres;
+        return rate.PerMinute / Guard.Positive(tidal.Litres, nameof(tidal));
     }
 }

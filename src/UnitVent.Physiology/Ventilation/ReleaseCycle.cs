@@ -24,11 +24,11 @@ public static class ReleaseCycle
     public static double Ratio(BreathTime timeHigh, BreathTime timeLow)
     {
         _ = CycleTime(timeHigh, timeLow);
-        return timeHigh.Seconds / timeLow.Seconds;
+        return timeHigh.Seconds / Guard.Positive(timeLow.Seconds, nameof(timeLow));
     }
 
     /// <summary>Computes the share of the cycle spent at P high, in percent.</summary>
     /// <exception cref="ArgumentOutOfRangeException">As for <see cref="CycleTime"/>.</exception>
     public static double ShareAtHighPercent(BreathTime timeHigh, BreathTime timeLow)
-        => 100 * timeHigh.Seconds / CycleTime(timeHigh, timeLow).Seconds;
+        => 100 * (timeHigh.Seconds / CycleTime(timeHigh, timeLow).Seconds);
 }

@@ -1,0 +1,10 @@
+namespace UnitVent.Physiology.Tests;
+
+internal static class Expect
+{
+    /// <summary>Compares with a printed value; the tolerance is half its last digit unless the source is coarser.</summary>
+    public static void Near(double expected, double actual, double tolerance, string reason)
+        => Assert.True(Math.Abs(expected - actual) <= tolerance, $"Expected {expected} ± {tolerance}, got {actual}: {reason}.");
+
+    public static void Refused(Func<object> compute) => Assert.Throws<ArgumentOutOfRangeException>(compute);
+}
