@@ -1,0 +1,33 @@
+namespace UnitVent.Store.Cluster;
+
+/// <summary>Makes the cluster of a data folder where there is none yet.</summary>
+internal static class ClusterMaker
+{
+    /// <summary>Makes the cluster beside its place and moves it there when it is whole, so that a broken attempt leaves no half of one.</summary>
+    public static async Task EnsureMadeAsync(
+        ClusterFolder folder, ServerAccount account, PostgresBinaries binaries, ClusterSecrets secrets, bool durable, CancellationToken cancellationToken)
+    {
+        DeleteUnfinished(folder);
+        if (folder.DataMajor is not null)
+        {
+            return;
+        }
+
+        await account.MakeFolderAsync(folder.Unfinished, cancellationToken);
+        var data = Path.Combine(folder.Unfinished, "data");
+        var passwordFile = Path.Combine(folder.Unfinished, "password");
+        await account.WriteFileAsync(passwordFile, secrets.Superuser, cancellationToken);
+        await ServerProgram.RunAsync(
+            account.Command(binaries.InitDb, ServerSettings.ForInitDb(durable, data, passwordFile)), cancellationToken);
+        Directory.Move(data, folder.Data);
+        DeleteUnfinished(folder);
+    }
+
+    private static void DeleteUnfinished(ClusterFolder folder)
+    {
+        if (Directory.Exists(folder.Unfinished))
+        {
+            Directory.Delete(folder.Unfinished, recursive: true);
+        }
+    }
+}

@@ -1,0 +1,31 @@
+using System.Diagnostics;
+using System.Runtime.CompilerServices;
+using UnitVent.Store.Cluster;
+
+namespace UnitVent.Store.Tests.Cluster;
+
+/// <summary>Another process that holds a cluster until it is killed: this test program itself, told so by a variable.</summary>
+internal static class ClusterHolder
+{
+    private const string FolderVariable = "UNITVENT_TEST_HOLD_CLUSTER";
+
+    public static async Task<Process> StartAsync(string folder)
+    {
+        var info = new ProcessStartInfo("dotnet", [typeof(ClusterHolder).Assembly.Location]) { RedirectStandardOutput = true };
+        info.Environment[FolderVariable] = folder;
+        var holder = Process.Start(info)!;
+        Assert.Equal("holding", await holder.StandardOutput.ReadLineAsync(TestContext.Current.CancellationToken));
+        return holder;
+    }
+
+    [ModuleInitializer]
+    internal static void HoldWhenTold()
+    {
+        if (Environment.GetEnvironmentVariable(FolderVariable) is { } folder)
+        {
+            LocalCluster.StartAsync(new(folder, Durable: true), CancellationToken.None).GetAwaiter().GetResult();
+            Console.WriteLine("holding");
+            Thread.Sleep(Timeout.Infinite);
+        }
+    }
+}
