@@ -1,0 +1,47 @@
+using UglyToad.PdfPig.Content;
+using UglyToad.PdfPig.Core;
+
+namespace UnitVent.Handover.Tests;
+
+/// <summary>What every sheet has to keep, whatever is on it.</summary>
+internal static class SheetAssert
+{
+    private const double MarginPoints = 40;
+    private const double TolerancePoints = 0.6;
+
+    public static void IsInsideMargins(PrintedSheet sheet)
+    {
+        foreach (var page in sheet.Pages)
+        {
+            Assert.All(page.Letters, letter =>
+            {
+                var box = PrintedPage.BoxOf(letter);
+                Assert.InRange(box.Left, MarginPoints - TolerancePoints, page.Page.Width - MarginPoints);
+                Assert.InRange(box.Right, MarginPoints, page.Page.Width - MarginPoints + TolerancePoints);
+                Assert.InRange(box.Bottom, MarginPoints - TolerancePoints, page.Page.Height - MarginPoints);
+                Assert.InRange(box.Top, MarginPoints, page.Page.Height - MarginPoints + TolerancePoints);
+            });
+        }
+    }
+
+    public static void HasNoOverlaps(PrintedSheet sheet)
+    {
+        foreach (var page in sheet.Pages)
+        {
+            var inked = page.Letters.Where(letter => !string.IsNullOrWhiteSpace(letter.Value)).Select(letter => (Letter: letter, Box: PrintedPage.BoxOf(letter))).ToList();
+            for (var i = 0; i < inked.Count; i++)
+            {
+                var under = inked.Skip(i + 1).Where(other => Overlap(inked[i].Box, other.Box)).Select(other => Place(other.Letter));
+                Assert.Equal([], under.Select(other => $"{other} under {Place(inked[i].Letter)} on page {page.Page.Number}"));
+            }
+        }
+    }
+
+    public static void HasNoSmallText(PrintedSheet sheet) =>
+        Assert.All(sheet.Pages.SelectMany(page => page.Letters), letter => Assert.InRange(letter.PointSize, 8.99, 100));
+
+    private static bool Overlap(PdfRectangle a, PdfRectangle b) =>
+        Math.Min(a.Right, b.Right) - Math.Max(a.Left, b.Left) > TolerancePoints && Math.Min(a.Top, b.Top) - Math.Max(a.Bottom, b.Bottom) > TolerancePoints;
+
+    private static string Place(Letter letter) => $"'{letter.Value}' at {letter.StartBaseLine.X:F0}, {letter.StartBaseLine.Y:F0}";
+}
