@@ -1,6 +1,7 @@
 using NodaTime;
 using UnitVent.Charting.Flags;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Rules;
 
 namespace UnitVent.Charting.Bands;
 
@@ -8,14 +9,63 @@ namespace UnitVent.Charting.Bands;
 /// <param name="Band">The band.</param>
 /// <param name="Why">One sentence, numbers first, with its age.</param>
 /// <param name="Since">Since when; null when nothing is raised.</param>
-public sealed record Standing(Band Band, string Why, Instant? Since)
+/// <param name="Cards">All open cards, the leading one first.</param>
+public sealed record Standing(Band Band, string Why, Instant? Since, IReadOnlyList<Card> Cards)
 {
-    /// <summary>Gets the card that leads; null when none is open.</summary>
-    public Card? Leading { get; private init; }
+    private const string Nothing = "Nothing raised.";
+    private const string NotKnownRuleId = "R17";
 
-    /// <summary>Gets all open cards, the leading one first.</summary>
-    public IReadOnlyList<Card> Cards { get; private init; } = [];
+    private static readonly Duration LateAfter = Duration.FromMinutes(30);
+
+    /// <summary>Gets the card that leads; null when none is open.</summary>
+    public Card? Leading => Cards.Count > 0 ? Cards[0] : null;
 
     /// <summary>Where the patient stands, from the open flags and the picture.</summary>
-    public static Standing Of(IReadOnlyList<Flag> open, PatientPicture picture) => new(Band.NothingRaised, "", null);
+    public static Standing Of(IReadOnlyList<Flag> open, PatientPicture picture)
+    {
+        ArgumentNullException.ThrowIfNull(picture);
+        var cards = CardsOf(open);
+        var unknown = picture.Outcomes.OfType<RuleOutcome.Raised>().FirstOrDefault(o => o.Rule == NotKnownRuleId)?.Finding;
+        var band = cards.Any(c => c.Severity == Severity.Urgent) ? Band.LookNow
+            : cards.Any(c => c.Severity == Severity.Caution || c.Flags.Any(f => f.Finding.Overdue)) ? Band.LookThisHour
+            : unknown is not null ? Band.NotKnown
+            : Band.NothingRaised;
+        if (band == Band.NotKnown)
+        {
+            return new(band, Sentence(unknown!.Says, "", cards.Count(c => c.Family != Family.Due)), unknown.SeenAt, cards);
+        }
+
+        return cards.Count == 0
+            ? new(band, Nothing, null, cards)
+            : new(band, Sentence(Says(cards[0]), Age(cards[0].Leading.Finding, picture), cards.Count - 1), cards[0].Flags.Min(f => f.Since), cards);
+    }
+
+    private static List<Card> CardsOf(IReadOnlyList<Flag> open)
+    {
+        // A long release explains a collapse: while oxygen falls too, both stand on one card.
+        var collapsing = open.Any(f => f.Finding.Family == Family.Collapse);
+        return [.. open
+            .GroupBy(f => collapsing && f.Finding.Family == Family.Timing ? Family.Collapse : f.Finding.Family)
+            .Select(g => new Card(g.Key, [.. g.OrderByDescending(f => f.Finding.Severity).ThenByDescending(f => f.Finding.SeenAt)]))
+            .OrderByDescending(c => c.Severity)
+            .ThenBy(c => c.InHand)
+            .ThenByDescending(c => c.Leading.Finding.SeenAt)];
+    }
+
+    private static string Says(Card card) => string.Join("; ", card.Flags.Select(f => f.Finding.Says));
+
+    private static string Sentence(string says, string age, int more) => says + age + (more > 0 ? $" · +{more} more" : "");
+
+    private static string Age(Finding finding, PatientPicture picture)
+    {
+        if (finding.Family == Family.Due)
+        {
+            return "";
+        }
+
+        var behind = finding.Entries.Count > 0 ? picture.Window.Standing.FirstOrDefault(e => e.Id == finding.Entries[0]) : null;
+        var late = behind is not null && behind.RecordedAt - behind.EffectiveAt > LateAfter ? " · late entry" : "";
+        var rechecked = picture.AsOf - finding.SeenAt > picture.Limits.Gas ? ", not rechecked" : "";
+        return $" · {Wording.Clock(finding.SeenAt, picture)}{rechecked}{late}";
+    }
 }

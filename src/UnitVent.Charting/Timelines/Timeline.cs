@@ -1,4 +1,7 @@
 using NodaTime;
+using UnitVent.Charting.Entries;
+using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Rules;
 using UnitVent.Charting.Windows;
 
 namespace UnitVent.Charting.Timelines;
@@ -11,5 +14,61 @@ namespace UnitVent.Charting.Timelines;
 public sealed record Timeline(Instant From, Instant To, IReadOnlyList<TimelineSeries> Series, IReadOnlyList<TimelineMark> Marks)
 {
     /// <summary>The timeline of a window that holds the entries of the range and the last of each kind before it.</summary>
-    public static Timeline Of(ChartWindow window, Instant from, Instant to) => new(from, to, [], []);
+    public static Timeline Of(ChartWindow window, Instant from, Instant to) => new(
+        from,
+        to,
+        [.. Settings(window, from, to), .. Gases(window, from, to), .. Checks(window, from, to)],
+        [.. TimelineMarks.Of(window, from, to)]);
+
+    private static IEnumerable<TimelineSeries> Settings(ChartWindow window, Instant from, Instant to)
+    {
+        yield return Stepped("pHighCmH2O", "P high", "cmH2O", s => (double?)s.Body.PHighCmH2O);
+        yield return Stepped("pLowCmH2O", "P low", "cmH2O", s => (double?)s.Body.PLowCmH2O);
+        yield return Stepped("peepCmH2O", "PEEP", "cmH2O", s => (double?)s.Body.PeepCmH2O);
+        yield return Stepped(ValueNames.MeanAirwayPressureComputed, "mean airway pressure", "cmH2O", s => MeanPressure.Computed(s, null).Value);
+        yield return Stepped("tHighS", "T high", "s", s => (double?)s.Body.THighS);
+        yield return Stepped("tLowS", "T low", "s", s => (double?)s.Body.TLowS);
+        yield return Stepped("fiO2", "FiO2", "", s => (double?)s.Body.FiO2);
+
+        TimelineSeries Stepped(string name, string label, string unit, Func<Charted<SettingChange>, double?> value) => new(
+            name, label, unit, true, [.. InRange<SettingChange>(window, EntryKind.SettingChange, from, to, true).Select(s => new TimelinePoint(s.At, value(s), s.Id))]);
+    }
+
+    private static IEnumerable<TimelineSeries> Gases(ChartWindow window, Instant from, Instant to)
+    {
+        var gases = GasPairing.Arterial(window, to).Where(g => g.Gas.At >= from).ToList();
+        yield return Line(ValueNames.PfRatio, "P/F", "mmHg", g => g.Values[ValueNames.PfRatio].Value);
+        yield return Line(ValueNames.OxygenationIndex, "oxygenation index", "", g => g.Values[ValueNames.OxygenationIndex].Value);
+        yield return Line("pH", "pH", "", g => (double?)g.Gas.Body.PH);
+        yield return Line("paCO2MmHg", "PaCO2", "mmHg", g => GasPairing.Tension(g.Gas, "pCO2", "PaCO2", b => b.PCO2).Value);
+        yield return Line("paO2MmHg", "PaO2", "mmHg", g => GasPairing.Tension(g.Gas, "pO2", "PaO2", b => b.PO2).Value);
+
+        TimelineSeries Line(string name, string label, string unit, Func<PairedGas, double?> value) =>
+            new(name, label, unit, false, [.. gases.Select(g => new TimelinePoint(g.Gas.At, value(g), g.Gas.Id))]);
+    }
+
+    private static IEnumerable<TimelineSeries> Checks(ChartWindow window, Instant from, Instant to)
+    {
+        var checks = InRange<VentilatorCheck>(window, EntryKind.VentilatorCheck, from, to, false).ToList();
+        var weight = Episodes.BodySize.PredictedWeightKg(window.Episode.Patient);
+        yield return Line(ValueNames.MeanAirwayPressureMeasured, "mean airway pressure, measured", "cmH2O", c => (double?)c.MeanAirwayPressureCmH2O);
+        yield return Line(ValueNames.EndReleaseFlowPercent, "end-release flow", "% of peak",
+            c => c is { PeakExpiratoryFlowLMin: not null, EndReleaseFlowLMin: not null } ? ReleaseChecks.EndFlowPercent(c) : null);
+        yield return Line(ValueNames.ReleaseVolumePerKg, "release volume", "mL/kg", c => (double?)c.ReleaseVolumeMl / weight);
+        yield return Line("spO2Percent", "SpO2", "%", c => (double?)c.SpO2Percent);
+        yield return Line("totalMinuteVolumeLMin", "total minute volume", "L/min", c => (double?)c.TotalMinuteVolumeLMin);
+        yield return Line("totalRatePerMin", "total rate", "/min", c => (double?)c.TotalRatePerMin);
+
+        TimelineSeries Line(string name, string label, string unit, Func<VentilatorCheck, double?> value) => new(
+            name, label, unit, false, [.. checks.Where(c => value(c.Body) is not null).Select(c => new TimelinePoint(c.At, value(c.Body), c.Id))]);
+    }
+
+    private static IEnumerable<Charted<T>> InRange<T>(ChartWindow window, EntryKind kind, Instant from, Instant to, bool withLastBefore)
+        where T : Entry
+    {
+        var all = window.Of<T>(kind, to).ToList();
+        var first = all.FindIndex(e => e.At >= from);
+        var start = first < 0 ? all.Count : first;
+        return all.Skip(withLastBefore ? Math.Max(0, start - 1) : start);
+    }
 }

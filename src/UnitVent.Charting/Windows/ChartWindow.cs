@@ -5,7 +5,11 @@ using UnitVent.Charting.Episodes;
 namespace UnitVent.Charting.Windows;
 
 /// <summary>Everything that a picture is computed from: the episode, the unit, and the entries that stand.</summary>
-/// <remarks>Holds the entries of the last 48 h and the last of each kind before. Entries that were struck out or replaced are left out.</remarks>
+/// <remarks>
+/// Holds the entries of the last 48 h, the last of each kind before, and, however old, every context, target, phase, method, event and
+/// follow-up of the episode: those are states, and the last one of a kind says nothing of the others. Entries that were struck out or
+/// replaced are left out.
+/// </remarks>
 public sealed class ChartWindow
 {
     private readonly Dictionary<EntryKind, List<ChartEntry>> byKind;

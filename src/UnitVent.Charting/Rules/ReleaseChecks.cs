@@ -1,0 +1,24 @@
+using UnitVent.Charting.Entries;
+using UnitVent.Charting.Pictures;
+using UnitVent.Physiology;
+
+namespace UnitVent.Charting.Rules;
+
+/// <summary>The checks that rules about releases look at.</summary>
+internal static class ReleaseChecks
+{
+    private const decimal LeakThatInvalidatesPercent = 30; // common practice
+
+    public static IReadOnlyList<Charted<VentilatorCheck>> WithFlows(PatientPicture picture) =>
+        [.. picture.Window.Of<VentilatorCheck>(EntryKind.VentilatorCheck, picture.AsOf)
+            .Where(c => c.Body is { PeakExpiratoryFlowLMin: not null, EndReleaseFlowLMin: not null })];
+
+    public static double EndFlowPercent(VentilatorCheck check) => 100 * ReleaseTermination.Ratio(
+        GasFlow.FromLitresPerMinute((double)check.PeakExpiratoryFlowLMin!), GasFlow.FromLitresPerMinute((double)check.EndReleaseFlowLMin!));
+
+    /// <summary>Why the mechanics of a check are not valid; null when they are.</summary>
+    public static string? NotValid(PatientPicture picture, Charted<VentilatorCheck> check) =>
+        check.Body.EffortDuringRelease == true ? "Not valid: effort during the release."
+        : picture.Has(Circumstance.AirLeak) || check.Body.LeakPercent > LeakThatInvalidatesPercent ? "Not valid with a leak."
+        : null;
+}

@@ -1,0 +1,83 @@
+using UnitVent.Charting.Entries;
+using UnitVent.Charting.Pictures;
+
+namespace UnitVent.Charting.Rules.Timing;
+
+/// <summary>R01: the release lasts long, so that the flow falls far before it ends.</summary>
+public sealed class ReleasedLongRule : Rule
+{
+    private const double HalfImportantChange = 5; // half of 10 points, the minimum important change of the ratio [common practice]
+
+    /// <inheritdoc/>
+    public override string Id => "R01";
+
+    /// <inheritdoc/>
+    public override Family Family => Family.Timing;
+
+    /// <inheritdoc/>
+    public override string Seen => "released long: end-release flow low, % of peak";
+
+    /// <inheritdoc/>
+    public override bool IsBackInside(Finding open, PatientPicture picture) =>
+        picture[ValueNames.EndReleaseFlowPercent].Value is not { } percent || percent >= Edges.Of(picture).Caution + HalfImportantChange;
+
+    /// <inheritdoc/>
+    protected override RuleOutcome Look(PatientPicture picture)
+    {
+        var flow = picture[ValueNames.EndReleaseFlowPercent];
+        if (flow.Value is not { } percent || flow.AsOf is not { } at)
+        {
+            return CannotTell(flow);
+        }
+
+        var check = ReleaseChecks.WithFlows(picture)[^1];
+        if (picture.Method == SettingMethod.TwoLevel || ReleaseChecks.NotValid(picture, check) is not null)
+        {
+            return CannotTell(ReleaseChecks.NotValid(picture, check) ?? "Not judged when two levels are set.");
+        }
+
+        var edges = Edges.Of(picture);
+        if (Level(picture, percent, edges) is not { } level)
+        {
+            return Clear(at);
+        }
+
+        var few = (check.Body.FlowReadings ?? check.Body.ReleasesAveraged ?? 1) < 2;
+        var says = $"release ended at {Wording.Number(percent)} % of peak, edge {Wording.Number(edges.Caution)} %{(few ? "; one release" : "")}";
+        return Raise(
+            level.LoweredIf(few),
+            says,
+            "flow trace, T low, stiffening, collapse, one-lung tube, pneumothorax, leak",
+            at,
+            Evidence.Of(-percent, [check.Id], ("endReleaseFlowPercent", percent), ("edgePercent", edges.Caution)));
+    }
+
+    private static Severity? Level(PatientPicture picture, double percent, Edges edges)
+    {
+        var before = ReleaseChecks.WithFlows(picture) is { Count: > 1 } checks ? ReleaseChecks.EndFlowPercent(checks[^2].Body) : (double?)null;
+        return percent < edges.Urgent ? (edges.PLowHolds ? Severity.Caution : Severity.Urgent)
+            : percent < edges.Caution ? Severity.Caution
+            : percent < edges.Advisory && before < edges.Advisory ? Severity.Advisory
+            : null;
+    }
+
+    private readonly record struct Edges(double Urgent, double Caution, double Advisory, bool PLowHolds)
+    {
+        public static Edges Of(PatientPicture picture)
+        {
+            var options = picture.Window.Unit.Thresholds.ReleasedLong;
+            var holds = (double?)picture.Settings?.Body.PLowCmH2O >= options.PLowThatHoldsCmH2O;
+            if (picture.Has(Circumstance.Obstructive))
+            {
+                return new(options.ObstructiveUrgentUnder, options.ObstructiveEdge, options.ObstructiveEdge, holds);
+            }
+
+            var own = (double?)picture.Targets?.Body.EndReleaseFlowPercent;
+            var fixedRate = picture.Method == SettingMethod.FixedRate;
+            var target = own ?? (fixedRate ? options.FixedRateTarget : options.FlowGuidedTarget);
+            return fixedRate
+                ? new(options.UrgentUnder, target - options.FixedRateCautionBelow, target, holds)
+                : new(options.UrgentUnder, target - options.FlowGuidedCautionBelow, target - options.FlowGuidedAdvisoryBelow, holds);
+        }
+    }
+}

@@ -1,0 +1,8 @@
+using NodaTime;
+
+namespace UnitVent.Charting.Trends;
+
+/// <summary>One value of a series.</summary>
+/// <param name="At">When it was so.</param>
+/// <param name="Value">The value.</param>
+public readonly record struct SeriesPoint(Instant At, double Value);

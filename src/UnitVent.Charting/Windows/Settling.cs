@@ -1,0 +1,30 @@
+using NodaTime;
+using UnitVent.Charting.Entries;
+
+namespace UnitVent.Charting.Windows;
+
+/// <summary>How long after a setting change a gas says nothing about the new settings yet [common practice].</summary>
+internal static class Settling
+{
+    private static readonly Duration AfterOxygenFraction = Duration.FromMinutes(10);
+    private static readonly Duration AfterPressureLowered = Duration.FromMinutes(5);
+    private static readonly Duration AfterPressureRaised = Duration.FromMinutes(60);
+
+    /// <summary>The settling time of oxygen after a change, against the settings before it; none when there were none.</summary>
+    public static Duration OfOxygen(ChartWindow window, Charted<SettingChange> change)
+    {
+        if (window.Latest<SettingChange>(EntryKind.SettingChange, change.At - Duration.Epsilon) is not { } before)
+        {
+            return Duration.Zero;
+        }
+
+        var pressure = Pressure(change.Body) - Pressure(before.Body);
+        return pressure > 0 ? AfterPressureRaised
+            : change.Body.FiO2 != before.Body.FiO2 ? AfterOxygenFraction
+            : pressure < 0 ? AfterPressureLowered
+            : Duration.Zero;
+    }
+
+    private static decimal Pressure(SettingChange settings) =>
+        (settings.PHighCmH2O ?? 0) + (settings.PeepCmH2O ?? 0) + (settings.InspiratoryPressureAbovePeepCmH2O ?? 0) + (settings.PressureSupportCmH2O ?? 0);
+}
