@@ -1,0 +1,62 @@
+using Microsoft.AspNetCore.Antiforgery;
+using Microsoft.AspNetCore.CookiePolicy;
+using Microsoft.AspNetCore.HttpOverrides;
+using MudBlazor.Services;
+using UnitVent.Web.Shared;
+
+namespace UnitVent.Web.Hosting;
+
+/// <summary>What the web application is made of.</summary>
+public static class WebServices
+{
+    private const int BodyLimitBytes = 64 * 1024;
+    private const int HubMessageLimitBytes = 32 * 1024;
+
+    public static void AddWeb(this WebApplicationBuilder builder)
+    {
+        builder.WebHost.UseStaticWebAssets();
+        builder.WebHost.ConfigureKestrel(kestrel =>
+        {
+            kestrel.AddServerHeader = false;
+            kestrel.Limits.MaxRequestBodySize = BodyLimitBytes;
+        });
+        builder.Services.AddScreens();
+        builder.Services.AddSignIn();
+        builder.Services.AddCookieRules();
+        builder.Services.Configure<ForwardedHeadersOptions>(o => o.ForwardedHeaders = ForwardedHeaders.XForwardedFor | ForwardedHeaders.XForwardedProto);
+        builder.Services.AddRateLimits();
+    }
+
+    private static void AddScreens(this IServiceCollection services)
+    {
+        services.AddRazorComponents().AddInteractiveServerComponents(circuit =>
+        {
+            circuit.DetailedErrors = false;
+            circuit.DisconnectedCircuitMaxRetained = 200;
+            circuit.DisconnectedCircuitRetentionPeriod = TimeSpan.FromMinutes(3);
+            circuit.JSInteropDefaultCallTimeout = TimeSpan.FromSeconds(10);
+            circuit.MaxBufferedUnacknowledgedRenderBatches = 10;
+        }).AddHubOptions(hub => hub.MaximumReceiveMessageSize = HubMessageLimitBytes);
+        services.AddMudServices();
+        services.AddScoped<CircuitSession>();
+        services.AddScoped<UnitInView>();
+    }
+
+    /// <summary>Every cookie is Secure. The antiforgery cookie would refuse plain HTTP on loopback if it were told so itself; the policy adds it.</summary>
+    private static void AddCookieRules(this IServiceCollection services)
+    {
+        services.Configure<CookiePolicyOptions>(policy =>
+        {
+            policy.Secure = CookieSecurePolicy.Always;
+            policy.HttpOnly = HttpOnlyPolicy.Always;
+            policy.MinimumSameSitePolicy = SameSiteMode.Strict;
+        });
+        services.Configure<AntiforgeryOptions>(antiforgery =>
+        {
+            antiforgery.Cookie.Name = "__Host-form";
+            antiforgery.Cookie.Path = "/";
+            antiforgery.Cookie.SecurePolicy = CookieSecurePolicy.None;
+            antiforgery.SuppressXFrameOptionsHeader = true;
+        });
+    }
+}

@@ -1,0 +1,27 @@
+// Says when the connection is lost, marks the page as stale, and reloads it as soon as the server answers again.
+const modal = document.getElementById("components-reconnect-modal");
+const tryEveryMs = 3000;
+let waiting = false;
+
+modal.addEventListener("components-reconnect-state-changed", event => {
+  const state = event.detail.state;
+  document.documentElement.toggleAttribute("data-stale", state !== "hide");
+  if (state === "show") {
+    const now = new Date();
+    document.getElementById("lost-since").textContent =
+      `${String(now.getHours()).padStart(2, "0")}:${String(now.getMinutes()).padStart(2, "0")}`;
+  }
+  if (state === "rejected" || state === "failed" || state === "resume-failed") reloadWhenAlive();
+});
+document.getElementById("lost-reload").addEventListener("click", () => location.reload());
+
+async function reloadWhenAlive() {
+  if (waiting) return;
+  waiting = true;
+  for (;;) {
+    try {
+      if ((await fetch("livez", { cache: "no-store" })).ok) return location.reload();
+    } catch { /* still away */ }
+    await new Promise(resume => setTimeout(resume, tryEveryMs));
+  }
+}
