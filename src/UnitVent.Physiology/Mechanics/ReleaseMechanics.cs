@@ -49,7 +49,7 @@ public static class ReleaseMechanics
     /// <summary>Says whether <see cref="ModelPeakFlow"/> gives a value: a tau above 0 s and a flow of at most 300 L/min.</summary>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="ratio"/> is NaN or outside [0, 1).</exception>
     public static bool CanModelPeakFlow(GasVolume release, BreathTime tau, double ratio)
-        => tau != default && PeakLitresPerMinute(release, tau, ratio) <= HighestFlowLitresPerMinute;
+        => PeakLitresPerMinute(release, tau, ratio) <= HighestFlowLitresPerMinute;
 
     /// <summary>Computes the peak flow the model implies, to be held against the one read: volume / [tau × (1 − r)].</summary>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="ratio"/> is NaN or outside [0, 1), or see

@@ -70,8 +70,8 @@ public sealed class ExpiratoryTimeConstantTests
     [Theory]
     [InlineData(0.5, 0, false)]
     [InlineData(0.5, 0.001, true)]
-    [InlineData(0.5, 0.99, true)]
-    [InlineData(0.5, 0.999, false)] // 500 s
+    [InlineData(0.5, 0.9915, true)] // 58.6 s
+    [InlineData(0.5, 0.9918, false)] // 60.7 s
     [InlineData(0.5, 1, false)]
     [InlineData(0.5, 1.01, false)]
     [InlineData(0.5, -0.1, false)]

@@ -13,6 +13,7 @@ public sealed class MinuteVentilationSplitTests
         { 5.2, 420, 12, 0.16, 3.1, false },
         { 4.9, 420, 12, 0, 0, true },
         { 9.6, 300, 14, 5.40, 56.3, false },
+        { 5.0, 500, 10, 0, 0, false }, // equal: nothing had to be forgiven
     };
 
     /// <summary>Common practice: a release part up to 5 % above the total is measurement error.</summary>
