@@ -17,13 +17,21 @@ public static class EntryCheck
     {
         ArgumentNullException.ThrowIfNull(entry);
         ArgumentNullException.ThrowIfNull(window);
-        return [.. Envelope(entry)
+        var open = Envelope(entry)
             .Concat(FieldLimits.Verdict(entry.Body, (entry.Body as BloodGas)?.TensionUnit ?? TensionUnit.MmHg))
             .Concat(TimeCheck.Verdict(entry.Body, window, now))
             .Concat(OfKind(entry.Body, window))
             .Where(e => !(e.IsAsk && entry.Confirmed.Contains(e.Code)))
-            .DistinctBy(e => (e.Field, e.Code))];
+            .DistinctBy(e => (e.Field, e.Code))
+            .ToList();
+        return [.. open.Where(e => !open.Exists(other => Explains(other, e)))];
     }
+
+    /// <summary>One question is better than three: what one mistake explains is not asked about as well.</summary>
+    private static bool Explains(FieldError one, FieldError other) => other.IsAsk && one != other && (
+        (!one.IsAsk && one.Field == other.Field)
+        || (one.Code == "ask.tensionUnit" && (other.Code is "ask.pO2" or "ask.pCO2" or "ask.gasConsistency"))
+        || (one.Code == "ask.timesSwapped" && (other.Code is "ask.tHighS" or "ask.tLowS")));
 
     private static IEnumerable<FieldError> Envelope(NewEntry entry)
     {

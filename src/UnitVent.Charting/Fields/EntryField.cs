@@ -17,8 +17,8 @@ public sealed class EntryField
         Number = attribute as NumberAttribute;
         Name = property.GetCustomAttribute<JsonPropertyNameAttribute>()?.Name ?? JsonNamingPolicy.CamelCase.ConvertName(property.Name);
         var type = Nullable.GetUnderlyingType(property.PropertyType) ?? property.PropertyType;
-        ValueType = type;
         Kind = KindOf(type);
+        ChoiceType = type.IsEnum ? type : null;
         Choices = Kind == FieldKind.Choice ? [.. Enum.GetNames(type).Select(JsonNamingPolicy.CamelCase.ConvertName)] : [];
     }
 
@@ -43,9 +43,13 @@ public sealed class EntryField
     /// <summary>Gets the choices as the HTTP interface spells them; empty unless it is a choice.</summary>
     public IReadOnlyList<string> Choices { get; }
 
-    internal Type ValueType { get; }
+    /// <summary>Gets the name of the member that holds it.</summary>
+    public string PropertyName => Property.Name;
 
-    internal PropertyInfo Property { get; }
+    /// <summary>Gets the type of its choices; null unless it is a choice.</summary>
+    public Type? ChoiceType { get; }
+
+    private PropertyInfo Property { get; }
 
     /// <summary>The value that an entry carries in this member; null when it was not recorded.</summary>
     public object? ValueIn(object entry) => Property.GetValue(entry);

@@ -23,16 +23,10 @@ internal readonly record struct Formula(string Name, string Unit, string Equatio
         }
 
         var values = Array.ConvertAll(inputs, g => g.Value!.Value);
-        if (undefined?.Invoke(values) is { } why)
-        {
-            return Without(ValueState.Domain, Undefined + why, inputs);
-        }
-
         try
         {
-            var value = compute(values);
-            return double.IsFinite(value)
-                ? With(value, doubt?.Invoke(values) ?? inputs.FirstOrDefault(g => g.State == ValueState.Validity).Because, inputs)
+            return undefined?.Invoke(values) is { } why ? Without(ValueState.Domain, Undefined + why, inputs)
+                : compute(values) is var value && double.IsFinite(value) ? With(value, doubt?.Invoke(values) ?? FirstDoubt(inputs), inputs)
                 : Without(ValueState.Domain, Undefined + "the result is not a number.", inputs);
         }
         catch (ArgumentOutOfRangeException)
@@ -50,6 +44,8 @@ internal readonly record struct Formula(string Name, string Unit, string Equatio
 
     private PictureValue With(double value, string? doubt, Given[] inputs) =>
         new(Name, Unit, value, doubt is null ? ValueState.Ok : ValueState.Validity, doubt, Kind, Equation, Oldest(inputs), Readings(inputs));
+
+    private static string? FirstDoubt(Given[] inputs) => inputs.FirstOrDefault(g => g.State == ValueState.Validity).Because;
 
     private static NodaTime.Instant? Oldest(Given[] inputs) => inputs.Where(g => g.At is not null).Select(g => g.At).DefaultIfEmpty(null).Min();
 

@@ -38,7 +38,7 @@ internal static class MeanPressure
     public static PictureValue Best(PictureValue computed, PictureValue measured) =>
         measured.Value is { } m && (computed.Value is not { } c || Agree(m, c)) ? measured : computed;
 
-    private static bool Agree(double measured, double computed) => MeanPressureAgreement.IsWithinTolerance(Pressure(measured), Pressure(computed));
+    private static bool Agree(double measured, double computed) => computed > 0 && MeanPressureAgreement.IsWithinTolerance(Pressure(measured), Pressure(computed));
 
     private static PictureValue VolumeControl(Charted<SettingChange>? settings, Charted<VentilatorCheck>? check) => Conventional.Of(
         [Read(check, "peakPressureCmH2O", "peak pressure", c => c.PeakPressureCmH2O), Read(check, "plateauPressureCmH2O", "plateau", c => c.PlateauPressureCmH2O),

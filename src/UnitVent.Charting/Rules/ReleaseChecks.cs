@@ -11,10 +11,13 @@ internal static class ReleaseChecks
 
     public static IReadOnlyList<Charted<VentilatorCheck>> WithFlows(PatientPicture picture) =>
         [.. picture.Window.Of<VentilatorCheck>(EntryKind.VentilatorCheck, picture.AsOf)
-            .Where(c => c.Body is { PeakExpiratoryFlowLMin: not null, EndReleaseFlowLMin: not null })];
+            .Where(c => EndFlowPercent(c.Body) is not null)];
 
-    public static double EndFlowPercent(VentilatorCheck check) => 100 * ReleaseTermination.Ratio(
-        GasFlow.FromLitresPerMinute((double)check.PeakExpiratoryFlowLMin!), GasFlow.FromLitresPerMinute((double)check.EndReleaseFlowLMin!));
+    /// <summary>End-release flow in % of peak; null when a flow is missing or the two do not belong together.</summary>
+    public static double? EndFlowPercent(VentilatorCheck check) =>
+        check is { PeakExpiratoryFlowLMin: { } peak, EndReleaseFlowLMin: { } end } && end < peak
+            ? 100 * ReleaseTermination.Ratio(GasFlow.FromLitresPerMinute((double)peak), GasFlow.FromLitresPerMinute((double)end))
+            : null;
 
     /// <summary>Why the mechanics of a check are not valid; null when they are.</summary>
     public static string? NotValid(PatientPicture picture, Charted<VentilatorCheck> check) =>

@@ -52,8 +52,7 @@ public sealed record Timeline(Instant From, Instant To, IReadOnlyList<TimelineSe
         var checks = InRange<VentilatorCheck>(window, EntryKind.VentilatorCheck, from, to, false).ToList();
         var weight = Episodes.BodySize.PredictedWeightKg(window.Episode.Patient);
         yield return Line(ValueNames.MeanAirwayPressureMeasured, "mean airway pressure, measured", "cmH2O", c => (double?)c.MeanAirwayPressureCmH2O);
-        yield return Line(ValueNames.EndReleaseFlowPercent, "end-release flow", "% of peak",
-            c => c is { PeakExpiratoryFlowLMin: not null, EndReleaseFlowLMin: not null } ? ReleaseChecks.EndFlowPercent(c) : null);
+        yield return Line(ValueNames.EndReleaseFlowPercent, "end-release flow", "% of peak", ReleaseChecks.EndFlowPercent);
         yield return Line(ValueNames.ReleaseVolumePerKg, "release volume", "mL/kg", c => (double?)c.ReleaseVolumeMl / weight);
         yield return Line("spO2Percent", "SpO2", "%", c => (double?)c.SpO2Percent);
         yield return Line("totalMinuteVolumeLMin", "total minute volume", "L/min", c => (double?)c.TotalMinuteVolumeLMin);

@@ -54,7 +54,7 @@ public sealed class ReleasedLongRule : Rule
 
     private static Severity? Level(PatientPicture picture, double percent, Edges edges)
     {
-        var before = ReleaseChecks.WithFlows(picture) is { Count: > 1 } checks ? ReleaseChecks.EndFlowPercent(checks[^2].Body) : (double?)null;
+        var before = ReleaseChecks.WithFlows(picture) is { Count: > 1 } checks ? ReleaseChecks.EndFlowPercent(checks[^2].Body) : null;
         return percent < edges.Urgent ? (edges.PLowHolds ? Severity.Caution : Severity.Urgent)
             : percent < edges.Caution ? Severity.Caution
             : percent < edges.Advisory && before < edges.Advisory ? Severity.Advisory
