@@ -9,7 +9,13 @@ public static class ContentSecurity
     private static readonly object NonceKey = new();
 
     /// <summary>The hashes of the style elements that the theme writes, light and dark. A test renders the theme and compares.</summary>
-    public static IReadOnlyList<string> ThemeStyleHashes { get; } = [];
+    public static IReadOnlyList<string> ThemeStyleHashes { get; } =
+    [
+        "sha256-ktKK7Zv7htgNiUfk5gyriqVJUMU7emNct5K2m6GIbXs=",
+        "sha256-XzQsP9HYv5dA8MQauHPLC9ALegSBxGglPvgN6fxiZvk=",
+        "sha256-OsgDvK8iikSfN4lyl/VPHHgKU/At6M/m2QvhUiZzhTU=",
+        "sha256-HEp7NBRAdgtRngCu51EuO44adVHptCXULj/ggGmLMOw=",
+    ];
 
     /// <summary>The nonce of this response; made on first use.</summary>
     public static string NonceOf(HttpContext http)

@@ -15,9 +15,7 @@ public static class Serve
         await using var database = await Database.OpenAsync(settings, cancel);
         builder.WebHost.UseUrls(settings.Url);
         builder.AddWeb();
-#pragma warning disable RS0030 // The one place that takes the machine's clock; everybody else is handed it.
-        builder.Services.AddSingleton<NodaTime.IClock>(NodaTime.SystemClock.Instance);
-#pragma warning restore RS0030
+        builder.Services.AddSingleton<NodaTime.IClock>(MachineClock.Clock);
         await using var app = builder.Build();
         app.UseWeb();
         await app.RunAsync(cancel);
