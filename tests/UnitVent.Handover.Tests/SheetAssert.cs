@@ -6,7 +6,7 @@ namespace UnitVent.Handover.Tests;
 /// <summary>What every sheet has to keep, whatever is on it.</summary>
 internal static class SheetAssert
 {
-    private const double MarginPoints = 40;
+    private const double MarginPoints = 36;
     private const double TolerancePoints = 0.6;
 
     public static void IsInsideMargins(PrintedSheet sheet)

@@ -9,5 +9,5 @@ internal abstract record Block
     public abstract IEnumerable<Piece> Lay(LayoutArea area);
 }
 
-/// <summary>The room a block is laid out for, in points, and the typesetter that measures its text.</summary>
-internal sealed record LayoutArea(Typesetter Typesetter, double Width, double Height);
+/// <summary>The room a block is laid out for, in points: its width, and how high a piece that is never split may be.</summary>
+internal sealed record LayoutArea(Typesetter Typesetter, double Width, double PieceHeight);

@@ -8,13 +8,13 @@ namespace UnitVent.Handover.Layout.Blocks;
 /// <summary>A box to write in by hand: what it is for, then labels each with a line after it.</summary>
 internal sealed record FillIn(string Purpose, IReadOnlyList<string> Labels) : Block
 {
-    private const double Padding = 6;
+    private const double Padding = 5;
     private const double Gap = 4;
-    private const double WritingHeight = 22;
+    private const double WritingHeight = 20;
 
     public override IEnumerable<Piece> Lay(LayoutArea area)
     {
-        var purpose = area.Typesetter.Wrap(Purpose, TextStyle.Body, area.Width - (2 * Padding));
+        var purpose = area.Typesetter.Wrap(Purpose, TextStyle.Strong, area.Width - (2 * Padding));
         var labels = Labels.Select(label => area.Typesetter.Line(label, TextStyle.Body)).ToList();
         var textHeight = purpose.Count * TextStyle.Body.LineHeight;
         var height = textHeight + WritingHeight + (2 * Padding);

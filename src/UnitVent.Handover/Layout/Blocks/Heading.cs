@@ -8,8 +8,7 @@ namespace UnitVent.Handover.Layout.Blocks;
 /// <summary>A heading, with an aside in body text on the same line, such as the time its data is from.</summary>
 internal sealed record Heading(string Text, string Aside = "") : Block
 {
-    private const double Above = 8;
-    private const double Below = 2;
+    private const double Below = 1;
     private const double Gap = 8;
 
     public override IEnumerable<Piece> Lay(LayoutArea area)
@@ -17,7 +16,7 @@ internal sealed record Heading(string Text, string Aside = "") : Block
         var lines = area.Typesetter.Wrap(Text, TextStyle.Heading, area.Width);
         var besides = area.Width - (lines.Count == 1 ? lines[0].Width + Gap : 0);
         var aside = area.Typesetter.Wrap(Aside, TextStyle.Dense, besides);
-        yield return Piece.Space(Above) with { KeepWithNext = true };
+        yield return Piece.Space(Space.Height) with { KeepWithNext = true };
         var textHeight = lines.Count * TextStyle.Heading.LineHeight;
         var asideTop = lines.Count == 1 ? TextStyle.Heading.Baseline - TextStyle.Dense.Baseline : textHeight;
         var height = Math.Max(textHeight, asideTop + (aside.Count * TextStyle.Dense.LineHeight)) + Below;

@@ -10,7 +10,7 @@ internal sealed record KeyValues(IReadOnlyList<KeyValue> Pairs, int Columns = 1)
 {
     private const double ColumnGap = 18;
     private const double LabelGap = 8;
-    private const double WidestLabelShare = 0.45;
+    private const double WidestLabelShare = 0.55;
     private const double Below = 1.5;
 
     public override IEnumerable<Piece> Lay(LayoutArea area)

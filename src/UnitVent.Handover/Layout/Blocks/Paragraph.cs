@@ -7,7 +7,7 @@ namespace UnitVent.Handover.Layout.Blocks;
 /// <summary>Running text; a page break never leaves one line of it alone.</summary>
 internal sealed record Paragraph(string Text, bool IsStrong = false) : Block
 {
-    private const double Below = 2;
+    private const double Below = 1;
 
     public override IEnumerable<Piece> Lay(LayoutArea area)
     {

@@ -3,29 +3,29 @@ using UnitVent.Handover.Layout.Paging;
 
 namespace UnitVent.Handover.Layout.Blocks;
 
-/// <summary>Two stacks of blocks beside each other, read left first; under each other when together they are higher than a page.</summary>
-internal sealed record SideBySide(IReadOnlyList<Block> Left, IReadOnlyList<Block> Right, double LeftShare = 0.5) : Block
+/// <summary>Two stacks of blocks beside each other, read left first; under each other when together they are higher than half a page.</summary>
+internal sealed record SideBySide(IReadOnlyList<Block> Left, IReadOnlyList<Block> Right) : Block
 {
     private const double Gap = 18;
 
     public override IEnumerable<Piece> Lay(LayoutArea area)
     {
-        var leftWidth = (area.Width - Gap) * LeftShare;
-        var left = Stack(Left, area with { Width = leftWidth });
-        var right = Stack(Right, area with { Width = area.Width - Gap - leftWidth });
+        var width = (area.Width - Gap) / 2;
+        var left = Stack(Left, area with { Width = width });
+        var right = Stack(Right, area with { Width = width });
         var height = Math.Max(HeightOf(left), HeightOf(right));
-        return height > area.Height
+        return height > area.PieceHeight
             ? Left.Concat(Right).SelectMany(block => block.Lay(area))
-            : [new Piece(height, (canvas, at) =>
+            : [Piece.Space(Space.Height) with { KeepWithNext = true }, new Piece(height, (canvas, at) =>
             {
                 Draw(left, canvas, at);
-                Draw(right, canvas, at + new XVector(leftWidth + Gap, 0));
+                Draw(right, canvas, at + new XVector(width + Gap, 0));
             })
             { Bookmarks = [.. left.Concat(right).SelectMany(piece => piece.Bookmarks)] }];
     }
 
     private static List<Piece> Stack(IReadOnlyList<Block> blocks, LayoutArea area) =>
-        [.. blocks.SelectMany(block => block.Lay(area))];
+        [.. blocks.SelectMany(block => block.Lay(area)).SkipWhile(piece => piece.IsSpace)];
 
     private static double HeightOf(List<Piece> pieces) => pieces.Sum(piece => piece.Height);
 

@@ -8,7 +8,7 @@ namespace UnitVent.Handover.Layout.Blocks;
 /// <summary>A measured row.</summary>
 internal sealed class TableRow
 {
-    public const double Padding = 2;
+    public const double Padding = 1.5;
 
     private const double MarkDrop = 1.2;
 

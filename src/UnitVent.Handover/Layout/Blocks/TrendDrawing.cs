@@ -8,8 +8,8 @@ namespace UnitVent.Handover.Layout.Blocks;
 /// <summary>Places and draws a trend strip.</summary>
 internal sealed class TrendDrawing
 {
-    private const double LaneHeight = 38;
-    private const double NameHeight = 18;
+    private const double LaneHeight = 27;
+    private const double NameHeight = 16;
     private const double MarkHeight = 5;
     private const double Gap = 6;
 

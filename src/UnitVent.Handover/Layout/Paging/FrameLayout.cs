@@ -10,6 +10,7 @@ internal sealed class FrameLayout
     private const double HeadShare = 0.68;
     private const double AsideShare = 0.3;
     private const double Gap = 6;
+    private const double PageNumberWidth = 80;
     private const string MissingNote = "Some characters could not be printed: no installed font has them.";
 
     private readonly XRect inside;
@@ -27,10 +28,11 @@ internal sealed class FrameLayout
         title = typesetter.Wrap(frame.Title, TextStyle.Title, inside.Width * HeadShare);
         detail = typesetter.Wrap(frame.Detail, TextStyle.Body, inside.Width * HeadShare);
         aside = typesetter.Wrap(watermark is null ? frame.Aside : $"{frame.Aside}\n{watermark}", TextStyle.Dense, inside.Width * AsideShare);
-        foot = [.. frame.Foot.SelectMany(line => typesetter.Wrap(line, TextStyle.Dense, inside.Width))];
+        foot = [.. frame.Foot.SkipLast(1).SelectMany(line => typesetter.Wrap(line, TextStyle.Dense, inside.Width)),
+            .. typesetter.Wrap(frame.Foot[^1], TextStyle.Dense, inside.Width - PageNumberWidth)];
         missingNote = typesetter.Line(MissingNote, TextStyle.Dense);
         var head = Math.Max(HeightOf(title) + HeightOf(detail), HeightOf(aside)) + Gap;
-        var footHeight = HeightOf(foot) + TextStyle.Dense.LineHeight + Gap;
+        var footHeight = HeightOf(foot) + (typesetter.HasMissing ? TextStyle.Dense.LineHeight : 0) + Gap;
         Body = new XRect(inside.X, inside.Y + head + Gap, inside.Width, inside.Height - head - footHeight - Gap);
     }
 
@@ -70,19 +72,17 @@ internal sealed class FrameLayout
             canvas.Artifact(_ => canvas.Lines(foot, new XPoint(inside.X, top)));
         }
 
-        DrawLastLines(canvas, number);
-    }
-
-    private void DrawLastLines(Canvas canvas, PageNumber number)
-    {
-        var lineHeight = TextStyle.Dense.LineHeight;
+        DrawPageNumber(canvas, number, top + HeightOf(foot) - TextStyle.Dense.LineHeight);
         if (canvas.HasMissing)
         {
-            canvas.Artifact(_ => canvas.Text(missingNote, new XPoint(inside.X, inside.Bottom - lineHeight)));
+            canvas.Artifact(_ => canvas.Text(missingNote, new XPoint(inside.X, top + HeightOf(foot))));
         }
+    }
 
+    private void DrawPageNumber(Canvas canvas, PageNumber number, double top)
+    {
         var page = typesetter.Line(number.ToString(), TextStyle.DenseStrong);
-        canvas.Artifact(_ => canvas.Text(page, new XPoint(inside.Right - page.Width, inside.Bottom - lineHeight)));
+        canvas.Artifact(_ => canvas.Text(page, new XPoint(inside.Right - page.Width, top)));
     }
 
     private void DrawWatermark(Canvas canvas)

@@ -4,5 +4,5 @@ namespace UnitVent.Handover.Layout.Paging;
 /// <param name="Title">Large, on the left: the bed and the name.</param>
 /// <param name="Detail">Under the title: what else tells one from another.</param>
 /// <param name="Aside">On the right: what kind of sheet this is, line by line.</param>
-/// <param name="Foot">Lines under the body.</param>
+/// <param name="Foot">Lines under the body; the page's number stands at the end of the last.</param>
 internal sealed record PageFrame(string Title, string Detail, string Aside, IReadOnlyList<string> Foot);

@@ -5,7 +5,7 @@ namespace UnitVent.Handover.Layout.Paging;
 /// <summary>The measures of a page in points (1/72 in).</summary>
 internal sealed record PageShape(double Width, double Height)
 {
-    public const double Margin = 40;
+    public const double Margin = 36;
 
     public XRect Inside => new(Margin, Margin, Width - (2 * Margin), Height - (2 * Margin));
 

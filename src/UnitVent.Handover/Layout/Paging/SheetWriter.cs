@@ -44,9 +44,10 @@ internal sealed class SheetWriter
 
     private void Write(SheetSection section)
     {
+        var area = new LayoutArea(typesetter, shape.Inside.Width, shape.Inside.Height / 2);
+        var pieces = section.Blocks.SelectMany(block => block.Lay(area)).ToList();
         var frame = new FrameLayout(section.Frame, sheet.Watermark, shape, typesetter);
-        var area = new LayoutArea(typesetter, frame.Body.Width, frame.Body.Height);
-        var pages = Paginator.Spread(section.Blocks.SelectMany(block => block.Lay(area)), frame.Body.Height);
+        var pages = Paginator.Spread(pieces, frame.Body.Height);
         for (var i = 0; i < pages.Count; i++)
         {
             WritePage(pages[i], frame, new PageNumber(i + 1, pages.Count), section.Bookmark);

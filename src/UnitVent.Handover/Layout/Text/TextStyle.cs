@@ -3,7 +3,7 @@ namespace UnitVent.Handover.Layout.Text;
 /// <summary>Size and weight of text. A sheet knows four sizes and one weight for emphasis.</summary>
 internal sealed record TextStyle(double Points, bool IsBold)
 {
-    private const double LineSpacing = 1.2;
+    private const double LineSpacing = 1.16;
     private const double BaselineShare = 0.94;
 
     public static TextStyle Title { get; } = new(13, true);

@@ -11,6 +11,9 @@ internal sealed class Typesetter(SystemFonts fonts, XGraphics measure)
     private static readonly Rune Replacement = Rune.ReplacementChar;
     private readonly Dictionary<(Rune, TextStyle), Glyph> known = [];
 
+    /// <summary>Gets whether anything set so far stands for a character that no installed font has.</summary>
+    public bool HasMissing { get; private set; }
+
     public IReadOnlyList<TextLine> Wrap(string text, TextStyle style, double width) =>
         [.. LineBreaker.Break(Glyphs(text, style), width).Select(line => TextLine.From(style, line))];
 
@@ -28,6 +31,7 @@ internal sealed class Typesetter(SystemFonts fonts, XGraphics measure)
         {
             glyph = Measured(character, style);
             known.Add((character, style), glyph);
+            HasMissing |= glyph.IsMissing;
         }
 
         return glyph;
