@@ -113,7 +113,7 @@ public sealed class PatientSheetTests
 
         Assert.Contains("Open cards Look this hour · as of 14:05", text);
         Assert.Contains("P/F 190 → 158 in 12 h · 12:05 2 h C. Charge: Gas at 16:00,", text);
-        Assert.Contains("until 15:05", text);
+        Assert.Contains("15:05", text);
     }
 
     [Fact]
@@ -147,7 +147,7 @@ public sealed class PatientSheetTests
         var text = Print(ExampleChart.Empty).Text;
 
         Assert.All(
-            ["not set this shift", "No settings charted.", "No arterial gas charted.", "No airway check charted.", "No targets set.", "None open.", "No note written.", "not known. Needs release"],
+            ["not set this shift", "No settings charted.", "No arterial gas charted.", "No airway check charted.", "No targets set.", "None open.", "No note written.", "Compliance, estimate not known. Needs"],
             sentence => Assert.Contains(sentence, text));
     }
 
