@@ -24,7 +24,7 @@ build() {
   need_dotnet
   if [[ -n ${ConnectionStrings__Owner:-} ]]; then need fonts; else need postgres fonts; fi
   echo "Building ..." >&2
-  dotnet build -c Release src/UnitVent.Web -clp:ErrorsOnly >&2
+  dotnet build -c Release src/UnitVent.Web -v quiet >&2
 }
 
 from=$PWD

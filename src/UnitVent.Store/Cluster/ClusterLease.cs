@@ -12,7 +12,13 @@ internal sealed class ClusterLease : IDisposable
     {
         try
         {
-            return new(new FileStream(folder.Lock, FileMode.OpenOrCreate, FileAccess.ReadWrite, FileShare.None));
+            return new(new FileStream(folder.Lock, new FileStreamOptions
+            {
+                Mode = FileMode.OpenOrCreate,
+                Access = FileAccess.ReadWrite,
+                Share = FileShare.None,
+                UnixCreateMode = UnixFileMode.UserRead | UnixFileMode.UserWrite,
+            }));
         }
         catch (IOException) when (File.Exists(folder.Lock))
         {

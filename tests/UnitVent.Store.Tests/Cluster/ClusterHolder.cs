@@ -11,7 +11,11 @@ internal static class ClusterHolder
 
     public static async Task<Process> StartAsync(string folder)
     {
-        var info = new ProcessStartInfo("dotnet", [typeof(ClusterHolder).Assembly.Location]) { RedirectStandardOutput = true };
+        var info = new ProcessStartInfo("dotnet", [typeof(ClusterHolder).Assembly.Location])
+        {
+            RedirectStandardInput = true,
+            RedirectStandardOutput = true,
+        };
         info.Environment[FolderVariable] = folder;
         var holder = Process.Start(info)!;
         Assert.Equal("holding", await holder.StandardOutput.ReadLineAsync(TestContext.Current.CancellationToken));
@@ -25,7 +29,8 @@ internal static class ClusterHolder
         {
             LocalCluster.StartAsync(new(folder, Durable: true), CancellationToken.None).GetAwaiter().GetResult();
             Console.WriteLine("holding");
-            Thread.Sleep(Timeout.Infinite);
+            Console.In.ReadToEnd(); // Ends with the test process, should that forget to kill this one.
+            Environment.Exit(0);
         }
     }
 }
