@@ -8,15 +8,14 @@ internal sealed class ClusterFolder
     private const UnixFileMode Private = UnixFileMode.UserRead | UnixFileMode.UserWrite | UnixFileMode.UserExecute;
     private const UnixFileMode PassThrough = UnixFileMode.GroupExecute | UnixFileMode.OtherExecute;
 
+    private const string UnfinishedPrefix = "postgres.unfinished";
+
     private readonly string path;
 
     private ClusterFolder(string path) => this.path = path;
 
     /// <summary>Gets the server's own folder.</summary>
     public string Data => Path.Combine(path, "postgres");
-
-    /// <summary>Gets the folder in which a cluster is made before it takes its place.</summary>
-    public string Unfinished => Path.Combine(path, "postgres.unfinished");
 
     public string Secrets => Path.Combine(path, "cluster-passwords.json");
 
@@ -38,6 +37,25 @@ internal sealed class ClusterFolder
         }
 
         return folder;
+    }
+
+    /// <summary>Names a folder in which a cluster is made before it takes its place; another one each time.</summary>
+    public string NameUnfinished() => Path.Combine(path, UnfinishedPrefix + Guid.NewGuid().ToString("N"));
+
+    /// <summary>Deletes what broken attempts to make a cluster left. What one of them is still writing to is left to a later start.</summary>
+    public void DeleteUnfinished()
+    {
+        foreach (var unfinished in Directory.GetDirectories(path, UnfinishedPrefix + "*"))
+        {
+            try
+            {
+                Directory.Delete(unfinished, recursive: true);
+            }
+            catch (IOException)
+            {
+                continue;
+            }
+        }
     }
 
     private static void MakeMissing(string path, UnixFileMode mode)

@@ -7,27 +7,20 @@ internal static class ClusterMaker
     public static async Task EnsureMadeAsync(
         ClusterFolder folder, ServerAccount account, PostgresBinaries binaries, ClusterSecrets secrets, bool durable, CancellationToken cancellationToken)
     {
-        DeleteUnfinished(folder);
+        folder.DeleteUnfinished();
         if (folder.DataMajor is not null)
         {
             return;
         }
 
-        await account.MakeFolderAsync(folder.Unfinished, cancellationToken);
-        var data = Path.Combine(folder.Unfinished, "data");
-        var passwordFile = Path.Combine(folder.Unfinished, "password");
+        var unfinished = folder.NameUnfinished();
+        await account.MakeFolderAsync(unfinished, cancellationToken);
+        var data = Path.Combine(unfinished, "data");
+        var passwordFile = Path.Combine(unfinished, "password");
         await account.WriteFileAsync(passwordFile, secrets.Superuser, cancellationToken);
         await ServerProgram.RunAsync(
             account.Command(binaries.InitDb, ServerSettings.ForInitDb(durable, data, passwordFile)), cancellationToken);
         Directory.Move(data, folder.Data);
-        DeleteUnfinished(folder);
-    }
-
-    private static void DeleteUnfinished(ClusterFolder folder)
-    {
-        if (Directory.Exists(folder.Unfinished))
-        {
-            Directory.Delete(folder.Unfinished, recursive: true);
-        }
+        folder.DeleteUnfinished();
     }
 }

@@ -26,6 +26,7 @@ internal static class ServerProgram
     public static async Task<string> RunAsync(ProcessStartInfo info, CancellationToken cancellationToken, string input = "")
     {
         using var process = Start(info);
+        await using var killOnCancel = cancellationToken.Register(() => process.Kill(entireProcessTree: true));
         await process.StandardInput.WriteAsync(input.AsMemory(), cancellationToken);
         process.StandardInput.Close();
         var errors = process.StandardError.ReadToEndAsync(cancellationToken);

@@ -9,7 +9,8 @@ internal static class ClusterHolder
 {
     private const string FolderVariable = "UNITVENT_TEST_HOLD_CLUSTER";
 
-    public static async Task<Process> StartAsync(string folder)
+    /// <summary>Starts the process, which may still be far from holding anything.</summary>
+    public static Process Start(string folder)
     {
         var info = new ProcessStartInfo("dotnet", [typeof(ClusterHolder).Assembly.Location])
         {
@@ -17,7 +18,13 @@ internal static class ClusterHolder
             RedirectStandardOutput = true,
         };
         info.Environment[FolderVariable] = folder;
-        var holder = Process.Start(info)!;
+        return Process.Start(info)!;
+    }
+
+    /// <summary>Starts the process and waits until its cluster is up.</summary>
+    public static async Task<Process> StartAsync(string folder)
+    {
+        var holder = Start(folder);
         Assert.Equal("holding", await holder.StandardOutput.ReadLineAsync(TestContext.Current.CancellationToken));
         return holder;
     }

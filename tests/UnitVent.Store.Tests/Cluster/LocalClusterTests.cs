@@ -84,7 +84,7 @@ public sealed class LocalClusterTests : IDisposable
 
         var server = PostmasterPid.Read(sandbox.Data)!.ProcessId;
         owner.Kill();
-        await WaitForEndAsync(server);
+        await WaitAsync(() => !Directory.Exists($"/proc/{server}"));
 
         await AssertStartFindsRowAsync();
     }
@@ -114,6 +114,19 @@ public sealed class LocalClusterTests : IDisposable
 
         Assert.Equal(1, await AskAsync<int>(cluster.RuntimeConnectionString, "select 1"));
         Assert.False(Directory.Exists(half.Parent!.FullName));
+    }
+
+    [Fact]
+    public async Task Start_AfterOwnerWasKilledMakingTheCluster_MakesItAnew()
+    {
+        using var owner = ClusterHolder.Start(sandbox.Folder);
+        await WaitAsync(() => Directory.Exists(sandbox.Folder) && Directory.GetDirectories(sandbox.Folder, "postgres.unfinished*").Length > 0);
+        owner.Kill();
+
+        await using var cluster = await sandbox.StartAsync();
+
+        Assert.True(cluster.IsOwner);
+        Assert.Equal(1, await AskAsync<int>(cluster.RuntimeConnectionString, "select 1"));
     }
 
     [Fact]
@@ -172,12 +185,12 @@ public sealed class LocalClusterTests : IDisposable
         victim.Kill();
     }
 
-    private static async Task WaitForEndAsync(int process)
+    private static async Task WaitAsync(Func<bool> condition)
     {
         var waited = Stopwatch.StartNew();
-        while (Directory.Exists($"/proc/{process}"))
+        while (!condition())
         {
-            Assert.True(waited.Elapsed < Patience, "the server is still there");
+            Assert.True(waited.Elapsed < Patience, "it did not happen");
             await Task.Delay(20, TestContext.Current.CancellationToken);
         }
     }
