@@ -61,8 +61,10 @@ public static class PatientSheet
         new SideBySide([.. MechanicsPart.Of(part)], [.. BreathingPart.Of(part)]),
         .. TrendPart.Of(part),
         new SideBySide([.. TargetsPart.Of(part)], [.. FollowUpsPart.Of(part)]),
-        .. FollowUpsPart.Notes(part),
-        new Space(),
-        new FillIn("Read back by the one who takes over; initials", ["Gave", "Took over", "Time"]),
+        new KeepTogether([
+            .. FollowUpsPart.Notes(part),
+            new Space(),
+            new FillIn("Read back by the one who takes over; initials", ["Gave", "Took over", "Time"]),
+        ]),
     ];
 }

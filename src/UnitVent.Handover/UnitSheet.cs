@@ -22,7 +22,8 @@ public static class UnitSheet
             $"{input.Patients.Count} in bed order",
             "Unit sheet",
             Cautions.Foot(times, input.PrintedAt, AsOf(input), input.PrintedBy));
-        var document = new SheetDocument($"Unit sheet, {input.Unit.Name}", paper, input.PrintedAt, [new SheetSection(input.Unit.Name, frame, [Body(input, times)])])
+        var section = new SheetSection(input.Unit.Name, frame, [Body(input, times)]);
+        var document = new SheetDocument($"Unit sheet, {input.Unit.Name}", paper, input.PrintedAt, [section])
         {
             Watermark = input.Unit.IsDemo ? Cautions.Demonstration : null,
         };
@@ -55,12 +56,22 @@ public static class UnitSheet
             now.Window.Episode.Bed,
             $"{facts.DisplayName()}\nMRN {facts.Mrn}",
             $"{(now.Settings is { } settings ? Words.Of(settings.Body) : "none charted")}\n{Numbers.Bare(now[ValueNames.VentilatorDays]) ?? "–"}",
-            new Cell($"{Stands(standing, times)}\n{standing.Why}".TrimEnd(), Mark: Marks.Of(standing.Band)),
+            new Cell(Stands(standing, times), Mark: Marks.Of(standing.Band)),
             InHandAndDue(patient, times));
     }
 
-    private static string Stands(Standing standing, Times times) =>
-        standing is { Band: Band.NotKnown, Since: { } since } ? $"{Words.Of(standing.Band)} since {times.At(since)}" : Words.Of(standing.Band);
+    /// <summary>The band's word and the sentence that says why, without saying the word twice.</summary>
+    private static string Stands(Standing standing, Times times)
+    {
+        var word = Words.Of(standing.Band);
+        if (standing.Why.StartsWith(word, StringComparison.OrdinalIgnoreCase))
+        {
+            return word + standing.Why[word.Length..];
+        }
+
+        var since = standing is { Band: Band.NotKnown, Since: { } from } ? $" since {times.At(from)}" : "";
+        return $"{word}{since}\n{standing.Why}";
+    }
 
     private static string InHandAndDue(UnitSheetPatient patient, Times times)
     {

@@ -10,7 +10,10 @@ public sealed class PatientSheetTests
 {
     private static readonly SheetInput Flagged = ExampleChart.Full with
     {
-        OpenFlags = [ExampleChart.OpenFlag(Severity.Caution, "P/F 190 → 158 in 12 h", new Acknowledgement(ExampleChart.Ago(1), "C. Charge", "Gas at 16:00", ExampleChart.Ago(-1), null, null))],
+        OpenFlags = [ExampleChart.OpenFlag(
+            Severity.Caution,
+            "P/F 190 → 158 in 12 h",
+            new Acknowledgement(ExampleChart.Ago(1), "C. Charge", "Gas at 16:00", ExampleChart.Ago(-1), null, null))],
     };
 
     [Theory, InlineData(Paper.A4), InlineData(Paper.Letter)]
@@ -36,7 +39,8 @@ public sealed class PatientSheetTests
     [Fact]
     public void EveryPage_CarriesTwoIdentifiersBedCautionsAndTheDemonstrationMark()
     {
-        var crowded = ExampleChart.Input(ExampleChart.Window([.. ExampleChart.Entries(), new Note { At = ExampleChart.Ago(1), Text = string.Join(' ', Enumerable.Repeat("note", 1500)) }]));
+        var note = new Note { At = ExampleChart.Ago(1), Text = string.Join(' ', Enumerable.Repeat("note", 1500)) };
+        var crowded = ExampleChart.Input(ExampleChart.Window([.. ExampleChart.Entries(), note]));
 
         var sheet = Print(crowded);
 
@@ -69,7 +73,15 @@ public sealed class PatientSheetTests
     [Fact]
     public void Gas_WithoutOxygenFraction_SaysWhyThereIsNoRatio()
     {
-        var gas = new BloodGas { DrawnAt = ExampleChart.Ago(1), Specimen = Specimen.Arterial, TensionUnit = TensionUnit.KPa, PH = 7.30m, PCO2 = 6.4m, PO2 = 10.1m };
+        var gas = new BloodGas
+        {
+            DrawnAt = ExampleChart.Ago(1),
+            Specimen = Specimen.Arterial,
+            TensionUnit = TensionUnit.KPa,
+            PH = 7.30m,
+            PCO2 = 6.4m,
+            PO2 = 10.1m,
+        };
 
         var sheet = Print(ExampleChart.Input(ExampleChart.Window([gas])));
 
@@ -147,14 +159,25 @@ public sealed class PatientSheetTests
         var text = Print(ExampleChart.Empty).Text;
 
         Assert.All(
-            ["not set this shift", "No settings charted.", "No arterial gas charted.", "No airway check charted.", "No targets set.", "None open.", "No note written.", "Compliance, estimate not known. Needs"],
+            [
+                "not set this shift", "No settings charted.", "No arterial gas charted.", "No airway check charted.",
+                "No targets set.", "None open.", "No note written.", "Compliance, estimate not known. Needs",
+            ],
             sentence => Assert.Contains(sentence, text));
     }
 
     [Fact]
     public void ConventionalMode_ShowsItsOwnSettingsAndMechanics()
     {
-        var settings = new SettingChange { ChangedAt = ExampleChart.Ago(3), Mode = VentilationMode.VolumeControl, TidalVolumeMl = 380, SetRatePerMin = 20, PeepCmH2O = 10, FiO2 = 0.4m };
+        var settings = new SettingChange
+        {
+            ChangedAt = ExampleChart.Ago(3),
+            Mode = VentilationMode.VolumeControl,
+            TidalVolumeMl = 380,
+            SetRatePerMin = 20,
+            PeepCmH2O = 10,
+            FiO2 = 0.4m,
+        };
 
         var text = Print(ExampleChart.Input(ExampleChart.Window([settings]))).Text;
 

@@ -40,9 +40,13 @@ internal sealed class PrintedPage(Page page)
 
     public string Text => string.Join('\n', Lines);
 
-    public string TurnedText => string.Concat(Page.Letters.Where(letter => letter.TextOrientation != TextOrientation.Horizontal).Select(letter => letter.Value));
+    public string TurnedText =>
+        string.Concat(Page.Letters.Where(letter => letter.TextOrientation != TextOrientation.Horizontal).Select(letter => letter.Value));
 
     /// <summary>The ink of a letter, roughly: from a little under its baseline to the height of a capital.</summary>
     public static PdfRectangle BoxOf(Letter letter) => new(
-        letter.StartBaseLine.X, letter.StartBaseLine.Y - (0.2 * letter.PointSize), letter.EndBaseLine.X, letter.StartBaseLine.Y + (0.72 * letter.PointSize));
+        letter.StartBaseLine.X,
+        letter.StartBaseLine.Y - (0.2 * letter.PointSize),
+        letter.EndBaseLine.X,
+        letter.StartBaseLine.Y + (0.72 * letter.PointSize));
 }

@@ -28,12 +28,14 @@ internal static class SheetAssert
     {
         foreach (var page in sheet.Pages)
         {
-            var inked = page.Letters.Where(letter => !string.IsNullOrWhiteSpace(letter.Value)).Select(letter => (Letter: letter, Box: PrintedPage.BoxOf(letter))).ToList();
-            for (var i = 0; i < inked.Count; i++)
-            {
-                var under = inked.Skip(i + 1).Where(other => Overlap(inked[i].Box, other.Box)).Select(other => Place(other.Letter));
-                Assert.Equal([], under.Select(other => $"{other} under {Place(inked[i].Letter)} on page {page.Page.Number}"));
-            }
+            var inked = page.Letters.Where(letter => !string.IsNullOrWhiteSpace(letter.Value))
+                .Select(letter => (Letter: letter, Box: PrintedPage.BoxOf(letter)))
+                .OrderBy(letter => letter.Box.Bottom).ToList();
+            var overlaps = inked.SelectMany((letter, i) => inked.Skip(i + 1)
+                .TakeWhile(other => other.Box.Bottom < letter.Box.Top)
+                .Where(other => Overlap(letter.Box, other.Box))
+                .Select(other => $"{Place(letter.Letter)} and {Place(other.Letter)} on page {page.Page.Number}"));
+            Assert.Empty(overlaps);
         }
     }
 

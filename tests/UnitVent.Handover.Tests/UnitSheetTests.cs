@@ -29,6 +29,17 @@ public sealed class UnitSheetTests
         Assert.Contains("P/F 190 → 158", sheet.Text);
     }
 
+    [Theory, InlineData(true, "Not known since"), InlineData(false, "Nothing raised")]
+    public void Band_ThatItsOwnSentenceNames_IsNotSaidTwice(bool emptyChart, string words)
+    {
+        var now = (emptyChart ? ExampleChart.Empty : ExampleChart.Full).Now;
+
+        var sheet = Print([new UnitSheetPatient(now, Standing.Of([], now))]);
+
+        Assert.Equal(2, sheet.Text.Split(words, StringSplitOptions.None).Length);
+        Assert.DoesNotContain(words.ToLowerInvariant(), sheet.Text);
+    }
+
     [Theory, InlineData(Paper.A4), InlineData(Paper.Letter)]
     public void FortyPatients_AreCompleteOnWholeRowsInsideTheMargins(Paper paper)
     {
@@ -36,8 +47,9 @@ public sealed class UnitSheetTests
 
         SheetAssert.IsInsideMargins(sheet);
         SheetAssert.HasNoOverlaps(sheet);
-        Assert.All(Enumerable.Range(1, 40), i =>
-            Assert.Single(sheet.Pages, page => page.Text.Contains($"begin{i} ", StringComparison.Ordinal) && page.Text.Contains($"end{i}", StringComparison.Ordinal)));
+        Assert.All(Enumerable.Range(1, 40), i => Assert.Single(
+            sheet.Pages,
+            page => page.Text.Contains($"begin{i} ", StringComparison.Ordinal) && page.Text.Contains($"end{i}", StringComparison.Ordinal)));
         Assert.All(sheet.Pages, page => Assert.Contains("Bed Patient", page.Text));
     }
 

@@ -23,8 +23,10 @@ internal static class GasesPart
         var shared = units.Count == 1 ? Unit(units[0]) : null;
         Column[] columns =
         [
-            new("Drawn"), new("pH", Align.Right), new(Tension("PaCO2", shared), Align.Right), new(Tension("PaO2", shared), Align.Right),
-            new("Lactate\nmmol/L", Align.Right), new("FiO2", Align.Right), new("P/F\nmmHg", Align.Right), new("Mean press.\ncmH2O", Align.Right), new("Position"),
+            new("Drawn"),
+            .. new[] { "pH", Tension("PaCO2", shared), Tension("PaO2", shared), "Lactate\nmmol/L", "FiO2", "P/F\nmmHg", "Mean press.\ncmH2O" }
+                .Select(head => new Column(head, Align.Right)),
+            new("Position"),
         ];
         return
         [

@@ -8,7 +8,9 @@ namespace UnitVent.Handover.Parts;
 /// <summary>The settings now beside those of 24 hours before; what changed stands out.</summary>
 internal static class SettingsPart
 {
-    private static readonly HashSet<string> Elsewhere = ["effectiveAt", "mode", "modeText", "phase", "reason", "pressureSupportReference", "tubeCompensationPercent"];
+    /// <summary>Printed in a column of their own, beside another member, or not at all.</summary>
+    private static readonly HashSet<string> Elsewhere =
+        ["effectiveAt", "mode", "modeText", "phase", "reason", "pressureSupportReference", "tubeCompensationPercent"];
 
     public static IEnumerable<Block> Of(SheetPart part)
     {
@@ -19,7 +21,9 @@ internal static class SettingsPart
 
         var before = part.Input.DayBefore?.Settings?.Body;
         var fields = EntryFields.Of<SettingChange>()
-            .Where(field => !Elsewhere.Contains(field.Name) && (field.ValueIn(now.Body) ?? (before is null ? null : field.ValueIn(before))) is not null).ToList();
+            .Where(field => !Elsewhere.Contains(field.Name))
+            .Where(field => field.ValueIn(now.Body) is not null || (before is not null && field.ValueIn(before) is not null))
+            .ToList();
         Column[] columns = [new(""), new("Mode"), .. fields.Select(Head)];
         return [new Heading("Settings", Aside(part, now)), new Table(columns, [Current(now.Body, before, fields), Earlier(now.Body, before, fields)])];
     }

@@ -42,7 +42,11 @@ internal static class SummaryPart
 
     private static string Context(PatientPicture now)
     {
-        var inForce = now.Context.Where(context => context.Body.Flag != Circumstance.DifficultAirway).Select(context => Words.Of(context.Body.Flag!.Value)).Concat(now.Ongoing.Order().Select(Words.Ongoing)).ToList();
+        var inForce = now.Context.Select(context => context.Body.Flag!.Value)
+            .Where(circumstance => circumstance != Circumstance.DifficultAirway)
+            .Select(Words.Of)
+            .Concat(now.Ongoing.Order().Select(Words.Ongoing))
+            .ToList();
         return inForce.Count > 0 ? string.Join(" · ", inForce) : "none recorded";
     }
 }

@@ -62,7 +62,11 @@ internal static class TrendPart
         var first = span.Start.InZone(zone).Date;
         return [.. Enumerable.Range(0, Period.DaysBetween(first, span.End.InZone(zone).Date) + 1)
             .Select(first.PlusDays)
-            .SelectMany(day => new[] { new TimeTick(zone.AtStartOfDay(day).ToInstant(), Times.WeekDay(day)), new TimeTick(zone.AtLeniently(day.At(LocalTime.Noon)).ToInstant(), "12:00") })
+            .SelectMany(day => new[]
+            {
+                new TimeTick(zone.AtStartOfDay(day).ToInstant(), Times.WeekDay(day)),
+                new TimeTick(zone.AtLeniently(day.At(LocalTime.Noon)).ToInstant(), "12:00"),
+            })
             .Where(tick => span.Contains(tick.At))];
     }
 

@@ -108,8 +108,10 @@ public sealed class SheetWriterTests
     [Fact]
     public void OnePage_WithTwoHundredCells_TakesAtMost80Kilobytes()
     {
-        var table = new Table([.. "abcdefgh".Select(name => new Column($"{name}"))], [.. Enumerable.Range(0, 25).Select(i => new Row([.. Enumerable.Repeat<Cell>($"{i}", 8)]))]);
-        var document = Example.Document([table, Example.Strip(new TrendPoint(Example.Morning, 158)), new Paragraph("The quick brown fox jumps over the lazy dog, 0123456789 %·→−.")]);
+        var rows = Enumerable.Range(0, 25).Select(i => new Row([.. Enumerable.Repeat<Cell>($"{i}", 8)]));
+        var table = new Table([.. "abcdefgh".Select(name => new Column($"{name}"))], [.. rows]);
+        var pangram = new Paragraph("The quick brown fox jumps over the lazy dog, 0123456789 %·→−.");
+        var document = Example.Document(table, Example.Strip(new TrendPoint(Example.Morning, 158)), pangram);
 
         var bytes = SheetWriter.Write(document, SystemFonts.Installed);
 

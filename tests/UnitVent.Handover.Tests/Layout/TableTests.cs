@@ -17,8 +17,9 @@ public sealed class TableTests
     {
         var sheet = Example.Print(Example.LongTable(60));
 
-        Assert.All(Enumerable.Range(1, 60), i =>
-            Assert.Single(sheet.Pages, page => page.Text.Contains($"reason{i} ", StringComparison.Ordinal) && page.Text.Contains($"end{i}", StringComparison.Ordinal)));
+        Assert.All(Enumerable.Range(1, 60), i => Assert.Single(
+            sheet.Pages,
+            page => page.Text.Contains($"reason{i} ", StringComparison.Ordinal) && page.Text.Contains($"end{i}", StringComparison.Ordinal)));
     }
 
     [Fact]

@@ -24,7 +24,8 @@ internal sealed record KeyValues(IReadOnlyList<KeyValue> Pairs, int Columns = 1)
                 labelWidths[column],
                 area.Typesetter.Wrap(pair.Label, TextStyle.Body, labelWidths[column] - LabelGap),
                 area.Typesetter.Wrap(pair.Value, TextStyle.Body.Emphasised(pair.IsStrong), columnWidth - labelWidths[column]))).ToList();
-            yield return new Piece(cells.Max(cell => cell.Lines) * TextStyle.Body.LineHeight + Below, (canvas, at) => cells.ForEach(cell => cell.Draw(canvas, at)));
+            var height = (cells.Max(cell => cell.Lines) * TextStyle.Body.LineHeight) + Below;
+            yield return new Piece(height, (canvas, at) => cells.ForEach(cell => cell.Draw(canvas, at)));
         }
     }
 

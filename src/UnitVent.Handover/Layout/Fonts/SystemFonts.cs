@@ -75,8 +75,9 @@ internal sealed class SystemFonts
         }
 
         throw new InvalidOperationException(
-            $"No font for printing was found in {string.Join(", ", folders)}. Install one, for example the package fonts-dejavu-core "
-            + $"(Debian, Ubuntu), dejavu-sans-fonts (Fedora) or ttf-dejavu (Alpine), or name a folder with DejaVuSans.ttf and DejaVuSans-Bold.ttf in {FolderVariable}.");
+            $"No font for printing was found in {string.Join(", ", folders)}. "
+            + "Install one, for example the package fonts-dejavu-core (Debian, Ubuntu), dejavu-sans-fonts (Fedora) or ttf-dejavu (Alpine), "
+            + $"or name a folder with DejaVuSans.ttf and DejaVuSans-Bold.ttf in {FolderVariable}.");
     }
 
     /// <summary>The file that draws a character: the text face if it can, else any installed; null when none has it.</summary>
