@@ -1,0 +1,129 @@
+using System.Text.Json;
+using Microsoft.EntityFrameworkCore;
+using NodaTime;
+using UnitVent.Charting.Entries;
+using UnitVent.Charting.Episodes;
+using UnitVent.Charting.Fields;
+using UnitVent.Charting.Windows;
+using UnitVent.Store.Model;
+using UnitVent.Store.Schema;
+
+namespace UnitVent.Store.Reading;
+
+/// <summary>Loads the windows that pictures are computed from.</summary>
+internal static class WindowLoader
+{
+    /// <summary>How far back a window holds every entry.</summary>
+    public static readonly Duration Span = Duration.FromHours(48);
+
+    // Per episode: everything of the span; states (context, targets, phase, method, events, follow-ups) however old; the last of every other kind before.
+    private const string EntriesSql = """
+        select e.*
+        from unnest({1}) as wanted(id)
+        cross join lateral (
+            select s.* from standing_entry s
+            where s.unit_id = {0} and s.episode_id = wanted.id and s.effective_at > {2} and s.effective_at <= {3}
+            union all
+            select s.* from standing_entry s
+            where s.unit_id = {0} and s.episode_id = wanted.id and s.effective_at <= {2}
+              and s.kind in ('Context', 'Target', 'Phase', 'Method', 'Event', 'FollowUp')
+            union all
+            select last.*
+            from (values ('SettingChange'), ('BloodGas'), ('VentilatorCheck'), ('BreathingCheck'), ('AirwayCheck'), ('Note')) as kinds(kind)
+            cross join lateral (
+                select s.* from standing_entry s
+                where s.unit_id = {0} and s.episode_id = wanted.id and s.kind = kinds.kind and s.effective_at <= {2}
+                order by s.effective_at desc, s.sequence desc
+                limit 1) last
+        ) e
+        """;
+
+    /// <summary>The window of one episode; null when it is not in the unit.</summary>
+    public static async Task<ChartWindow?> OfEpisodeAsync(
+        UnitVentDbContext db, Place place, Instant now, CancellationToken cancellationToken, Instant? since = null)
+    {
+        var profile = await ProfileAsync(db, place.UnitId, cancellationToken);
+        var episodes = await EpisodesAsync(db, place.UnitId, e => e.Id == place.EpisodeId, cancellationToken);
+        return episodes.Count == 0 ? null : (await WindowsAsync(db, profile, episodes, now, since, cancellationToken))[0];
+    }
+
+    /// <summary>The windows of every episode that lasts.</summary>
+    public static async Task<IReadOnlyList<ChartWindow>> OfUnitAsync(UnitVentDbContext db, UnitProfile profile, Instant now, CancellationToken cancellationToken)
+    {
+        var episodes = await EpisodesAsync(db, profile.Id, e => e.EndedAt == null, cancellationToken);
+        return await WindowsAsync(db, profile, episodes, now, null, cancellationToken);
+    }
+
+    /// <summary>A unit as its charts are read.</summary>
+    public static async Task<UnitProfile> ProfileAsync(UnitVentDbContext db, Guid unitId, CancellationToken cancellationToken)
+    {
+        var unit = await db.Units.AsNoTracking().FirstAsync(u => u.Id == unitId, cancellationToken);
+        var beds = await db.Beds.AsNoTracking().Where(b => b.UnitId == unitId && !b.Retired).OrderBy(b => b.Position).Select(b => b.Name).ToListAsync(cancellationToken);
+        return Profile(unit, beds);
+    }
+
+    internal static UnitProfile Profile(UnitRow unit, IReadOnlyList<string> beds) => new(unit.Id, unit.Code, unit.Name, DateTimeZoneProviders.Tzdb[unit.TimeZone])
+    {
+        AltitudeM = unit.AltitudeM,
+        TensionUnit = unit.TensionUnit,
+        Method = unit.Method,
+        CheckInterval = unit.CheckInterval,
+        ShiftStarts = [.. unit.ShiftStarts.Order()],
+        IsDemo = unit.IsDemo,
+        Beds = beds,
+    };
+
+    private static async Task<List<EpisodeFacts>> EpisodesAsync(
+        UnitVentDbContext db, Guid unitId, System.Linq.Expressions.Expression<Func<EpisodeRow, bool>> which, CancellationToken cancellationToken)
+    {
+        var rows = await db.Episodes.AsNoTracking().TagWith("WindowLoader.Episodes")
+            .Where(e => e.UnitId == unitId)
+            .Where(which)
+            .Join(db.Patients, e => new { e.UnitId, Id = e.PatientId }, p => new { p.UnitId, p.Id }, (e, p) => new { Episode = e, p.Facts })
+            .Select(r => new
+            {
+                r.Episode,
+                r.Facts,
+                Bed = db.BedStays.Where(s => s.UnitId == unitId && s.EpisodeId == r.Episode.Id)
+                    .OrderByDescending(s => s.From)
+                    .Join(db.Beds, s => new { s.UnitId, Id = s.BedId }, b => new { b.UnitId, b.Id }, (s, b) => b.Name)
+                    .First(),
+            })
+            .ToListAsync(cancellationToken);
+        return [.. rows.Select(r => new EpisodeFacts(
+            r.Episode.Id, unitId, r.Bed, JsonSerializer.Deserialize<PatientFacts>(r.Facts, ChartJson.Options)!, r.Episode.AirwaySecuredAt, r.Episode.AdmittedAt)
+        {
+            Reason = r.Episode.Reason,
+            EndedAt = r.Episode.EndedAt,
+            Outcome = r.Episode.Outcome,
+        })];
+    }
+
+    private static async Task<List<ChartWindow>> WindowsAsync(
+        UnitVentDbContext db, UnitProfile profile, List<EpisodeFacts> episodes, Instant now, Instant? since, CancellationToken cancellationToken)
+    {
+        var ids = episodes.Select(e => e.Id).ToArray();
+        var entries = await EntriesAsync(db, profile.Id, ids, since ?? now - Span, now, cancellationToken);
+        var steps = await StepsAsync(db, profile.Id, entries.Where(e => e.Kind == EntryKind.FollowUp).Select(e => e.Id).ToArray(), cancellationToken);
+        var byEpisode = entries.ToLookup(e => e.EpisodeId);
+        return [.. episodes.Select(e => new ChartWindow(e, profile, byEpisode[e.Id].Select(r => r.ToEntry()), steps))];
+    }
+
+    internal static Task<List<EntryRow>> EntriesAsync(
+        UnitVentDbContext db, Guid unitId, Guid[] episodes, Instant after, Instant until, CancellationToken cancellationToken) =>
+        db.Entries.FromSqlRaw(EntriesSql, unitId, episodes, after, until).AsNoTracking().TagWith("WindowLoader.Entries").ToListAsync(cancellationToken);
+
+    private static async Task<Dictionary<Guid, FollowUpStep>> StepsAsync(UnitVentDbContext db, Guid unitId, Guid[] followUps, CancellationToken cancellationToken)
+    {
+        if (followUps.Length == 0)
+        {
+            return [];
+        }
+
+        var steps = await db.FollowUpSteps.AsNoTracking()
+            .Where(s => s.UnitId == unitId && followUps.Contains(s.FollowUpId) && s.Step != FollowUpStep.Reassigned)
+            .Select(s => new { s.FollowUpId, s.Step })
+            .ToListAsync(cancellationToken);
+        return steps.DistinctBy(s => s.FollowUpId).ToDictionary(s => s.FollowUpId, s => s.Step);
+    }
+}

@@ -1,0 +1,18 @@
+using Microsoft.EntityFrameworkCore;
+using Npgsql;
+
+namespace UnitVent.Store.Schema;
+
+/// <summary>How a context reaches its database.</summary>
+internal static class ContextOptions
+{
+    public static NpgsqlDataSource DataSource(string connectionString)
+    {
+        var builder = new NpgsqlDataSourceBuilder(connectionString);
+        builder.UseNodaTime();
+        return builder.Build();
+    }
+
+    public static DbContextOptionsBuilder Configure(DbContextOptionsBuilder builder, NpgsqlDataSource source) =>
+        builder.UseNpgsql(source, npgsql => npgsql.UseNodaTime()).UseSnakeCaseNamingConvention();
+}

@@ -1,0 +1,22 @@
+-- What the role that the program runs as may do. Run after every migration.
+do $$
+declare t text;
+begin
+    execute format('grant usage on schema public to %I', '{role}');
+    execute format('revoke all on all tables in schema public from %I', '{role}');
+    foreach t in array array['entry', 'strike_out', 'follow_up_step', 'flag_event', 'episode_event', 'patient_fact', 'audit_event', 'unit_lookup']
+    loop
+        execute format('grant select, insert on %I to %I', t, '{role}');
+    end loop;
+    foreach t in array array['unit', 'bed', 'patient', 'episode', 'bed_stay', 'flag', 'membership', 'api_token', 'set_up', 'data_protection_keys']
+    loop
+        execute format('grant select, insert, update on %I to %I', t, '{role}');
+    end loop;
+    for t in select c.relname from pg_class c join pg_namespace n on n.oid = c.relnamespace
+             where n.nspname = 'public' and c.relkind = 'r' and c.relname like 'asp_net_%' or c.relname = 'membership'
+    loop
+        execute format('grant select, insert, update, delete on %I to %I', t, '{role}');
+    end loop;
+    execute format('grant select on standing_entry, audit_head to %I', '{role}');
+    execute format('grant usage, select on all sequences in schema public to %I', '{role}');
+end $$;

@@ -1,0 +1,90 @@
+using System.Net.Sockets;
+using Microsoft.EntityFrameworkCore;
+using Npgsql;
+using UnitVent.Charting.Results;
+using UnitVent.Store.People;
+using UnitVent.Store.Schema;
+
+namespace UnitVent.Store;
+
+/// <summary>The one place where a unit's data is reached: checks the membership, opens a transaction, names the unit to the database.</summary>
+internal sealed class UnitScope(IDbContextFactory<UnitVentDbContext> contexts)
+{
+    /// <summary>Finds what an id belongs to and works in its unit. Another unit's id answers as if absent.</summary>
+    public Task<Result<T>> WithAsync<T>(
+        Actor actor, Guid id, string what, Operation operation, Func<UnitVentDbContext, Place, Task<Result<T>>> work, CancellationToken cancellationToken) =>
+        GuardedAsync(async () =>
+        {
+            await using var db = await contexts.CreateDbContextAsync(cancellationToken);
+            var found = await db.UnitLookups.AsNoTracking().FirstOrDefaultAsync(l => l.Id == id, cancellationToken);
+            return found is null || !actor.May(Operation.Read, found.UnitId) ? Refusals.NotFound<T>(what)
+                : !actor.May(operation, found.UnitId) ? Refusals.Denied<T>()
+                : await InTransactionAsync(db, new Place(found.UnitId, found.EpisodeId), work, cancellationToken);
+        });
+
+    /// <summary>Works in the unit with a code. A unit that the actor may not see answers as if absent.</summary>
+    public Task<Result<T>> WithUnitAsync<T>(
+        Actor actor, string code, Operation operation, Func<UnitVentDbContext, Place, Task<Result<T>>> work, CancellationToken cancellationToken) =>
+        GuardedAsync(async () =>
+        {
+            await using var db = await contexts.CreateDbContextAsync(cancellationToken);
+            var unit = await db.Units.AsNoTracking().Where(u => u.Code == code).Select(u => (Guid?)u.Id).FirstOrDefaultAsync(cancellationToken);
+            return unit is not { } id || !actor.May(Operation.Read, id) ? Refusals.NotFound<T>("unit")
+                : !actor.May(operation, id) ? Refusals.Denied<T>()
+                : await InTransactionAsync(db, new Place(id, Guid.Empty), work, cancellationToken);
+        });
+
+    /// <summary>Works in a unit for the program itself: evaluation, boards.</summary>
+    public Task<Result<T>> WithinAsync<T>(Guid unitId, Func<UnitVentDbContext, Place, Task<Result<T>>> work, CancellationToken cancellationToken) =>
+        GuardedAsync(async () =>
+        {
+            await using var db = await contexts.CreateDbContextAsync(cancellationToken);
+            return await InTransactionAsync(db, new Place(unitId, Guid.Empty), work, cancellationToken);
+        });
+
+    /// <summary>Works outside any unit: people, tokens, set-up.</summary>
+    public Task<Result<T>> OutsideAsync<T>(Func<UnitVentDbContext, Task<Result<T>>> work, CancellationToken cancellationToken) =>
+        GuardedAsync(async () =>
+        {
+            await using var db = await contexts.CreateDbContextAsync(cancellationToken);
+            return await InTransactionAsync(db, new Place(Guid.Empty, Guid.Empty), (context, _) => work(context), cancellationToken);
+        });
+
+    /// <summary>Runs something that reaches the store; a store that does not answer is a refusal, not an exception.</summary>
+    public static async Task<Result<T>> GuardedAsync<T>(Func<Task<Result<T>>> work)
+    {
+        try
+        {
+            return await work();
+        }
+        catch (Exception e) when (IsUnavailable(e))
+        {
+            return Refusals.Unavailable<T>();
+        }
+    }
+
+    private static async Task<Result<T>> InTransactionAsync<T>(
+        UnitVentDbContext db, Place place, Func<UnitVentDbContext, Place, Task<Result<T>>> work, CancellationToken cancellationToken)
+    {
+        await using var transaction = await db.Database.BeginTransactionAsync(cancellationToken);
+        await db.Database.ExecuteSqlAsync($"select set_config('unitvent.unit', {place.UnitId.ToString()}, true)", cancellationToken);
+        var result = await work(db, place);
+        if (result.Succeeded)
+        {
+            await transaction.CommitAsync(cancellationToken);
+        }
+
+        return result;
+    }
+
+    // 08 connection, 53 out of resources, 57P operator intervention, 3D000 no such database: nothing of it is the caller's doing.
+    private static bool IsUnavailable(Exception exception) => exception switch
+    {
+        PostgresException postgres => postgres.SqlState is "3D000" || postgres.SqlState.StartsWith("08", StringComparison.Ordinal)
+            || postgres.SqlState.StartsWith("53", StringComparison.Ordinal) || postgres.SqlState.StartsWith("57P", StringComparison.Ordinal),
+        NpgsqlException or TimeoutException or SocketException => true,
+        DbUpdateException { InnerException: { } inner } => IsUnavailable(inner),
+        InvalidOperationException { InnerException: { } inner } => IsUnavailable(inner),
+        _ => false,
+    };
+}
