@@ -7,6 +7,14 @@ namespace UnitVent.Store.Tests;
 public sealed class TestDatabaseTests
 {
     [Fact]
+    public async Task Create_First_IsMigratedAndEmpty()
+    {
+        await using var database = await TestDatabase.CreateAsync();
+
+        Assert.Equal(0, await ClusterSandbox.AskAsync<long>(database.OwnerConnectionString, "select count(*) from entry"));
+    }
+
+    [Fact]
     public async Task Create_Twice_GivesDatabasesThatDoNotSeeEachOther()
     {
         await using var first = await TestDatabase.CreateAsync();

@@ -1,10 +1,11 @@
 using Npgsql;
+using UnitVent.Store;
 using UnitVent.Store.Cluster;
 
 namespace UnitVent.Testing;
 
 /// <summary>The database server of this test process, with a migrated database to copy; started by the first test that needs one.</summary>
-public sealed class TestServer
+internal sealed class TestServer
 {
     private const string Template = "unitvent_template";
 
@@ -12,20 +13,17 @@ public sealed class TestServer
 
     private TestServer(ServerAccess access) => Access = access;
 
-    /// <summary>Gets or sets what migrates an empty database: given the owner's connection string and the run-time role.</summary>
-    public static Func<string, string, Task> Migrate { get; set; } = (_, _) => Task.CompletedTask;
+    public static Task<TestServer> Shared => Started.Value;
 
-    internal static Task<TestServer> Shared => Started.Value;
+    public ServerAccess Access { get; }
 
-    internal ServerAccess Access { get; }
-
-    internal async Task CopyTemplateAsync(string database)
+    public async Task CopyTemplateAsync(string database)
     {
         await using var superuser = await OpenAsync();
         await DatabaseRoles.EnsureDatabaseAsync(superuser, database, CancellationToken.None, Template);
     }
 
-    internal async Task DropAsync(string database)
+    public async Task DropAsync(string database)
     {
         await using var superuser = await OpenAsync();
         await ExecuteAsync(superuser, $"drop database {database} with (force)");
@@ -42,7 +40,7 @@ public sealed class TestServer
     {
         await using var superuser = await OpenAsync();
         await DatabaseRoles.EnsureDatabaseAsync(superuser, Template, CancellationToken.None);
-        await Migrate(Access.OwnerOf(Template), DatabaseRoles.Runtime);
+        await StoreMigrations.MigrateAsync(Access.OwnerOf(Template), DatabaseRoles.Runtime, CancellationToken.None);
         await ExecuteAsync(superuser, $"alter database {Template} allow_connections false");
     }
 
