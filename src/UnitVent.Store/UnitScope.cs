@@ -77,11 +77,12 @@ internal sealed class UnitScope(IDbContextFactory<UnitVentDbContext> contexts)
         return result;
     }
 
-    // 08 connection, 53 out of resources, 57P operator intervention, 3D000 no such database: nothing of it is the caller's doing.
+    // What ends the connection (FATAL), class 08 (connection) and class 53 (out of resources) are nobody's doing who charts.
     private static bool IsUnavailable(Exception exception) => exception switch
     {
-        PostgresException postgres => postgres.SqlState is "3D000" || postgres.SqlState.StartsWith("08", StringComparison.Ordinal)
-            || postgres.SqlState.StartsWith("53", StringComparison.Ordinal) || postgres.SqlState.StartsWith("57P", StringComparison.Ordinal),
+        PostgresException postgres => postgres.InvariantSeverity is "FATAL" or "PANIC"
+            || postgres.SqlState.StartsWith("08", StringComparison.Ordinal)
+            || postgres.SqlState.StartsWith("53", StringComparison.Ordinal),
         NpgsqlException or TimeoutException or SocketException => true,
         DbUpdateException { InnerException: { } inner } => IsUnavailable(inner),
         InvalidOperationException { InnerException: { } inner } => IsUnavailable(inner),

@@ -33,13 +33,8 @@ internal static class Admitting
             return Result<AdmitReceipt>.Refused(Refusal.Value, errors);
         }
 
-        if (await BedStays.FindAsync(db, unitId, admission.Bed, cancellationToken) is not { } bed)
-        {
-            return Result<AdmitReceipt>.Refused(Refusal.Value, "bed", "bed.unknown", $"There is no bed {admission.Bed} in this unit.");
-        }
-
-        return await BedStays.IsTakenAsync(db, unitId, bed.Id, cancellationToken)
-            ? Refusals.BedTaken<AdmitReceipt>(admission.Bed)
+        return await BedStays.FindAsync(db, unitId, admission.Bed, cancellationToken) is null
+            ? Result<AdmitReceipt>.Refused(Refusal.Value, "bed", "bed.unknown", $"There is no bed {admission.Bed} in this unit.")
             : await InsertAsync(db, unitId, actor, admission, now, cancellationToken);
     }
 
@@ -53,7 +48,11 @@ internal static class Admitting
         };
         db.Episodes.Add(episode);
         db.UnitLookups.Add(new UnitLookupRow { Id = episode.Id, UnitId = unitId, EpisodeId = episode.Id });
-        await BedStays.TakeAsync(db, episode, admission.Bed, now, cancellationToken);
+        if (!await BedStays.TakeAsync(db, episode, admission.Bed, now, cancellationToken))
+        {
+            return Refusals.BedTaken<AdmitReceipt>(admission.Bed);
+        }
+
         new DeskStep(db, episode, admission.Id, "admit", actor, now).Done(admission.Bed);
         db.Entries.AddRange(Circumstances(admission, now).Select(e => EntryRow.Of(unitId, episode.Id, e, now, actor)));
         try

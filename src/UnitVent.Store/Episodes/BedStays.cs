@@ -34,7 +34,7 @@ internal static class BedStays
     public static Task<BedRow?> FindAsync(UnitVentDbContext db, Guid unitId, string name, CancellationToken cancellationToken) =>
         db.Beds.AsNoTracking().FirstOrDefaultAsync(b => b.UnitId == unitId && b.Name == name && !b.Retired, cancellationToken);
 
-    public static Task<bool> IsTakenAsync(UnitVentDbContext db, Guid unitId, Guid bedId, CancellationToken cancellationToken) =>
+    private static Task<bool> IsTakenAsync(UnitVentDbContext db, Guid unitId, Guid bedId, CancellationToken cancellationToken) =>
         db.BedStays.AnyAsync(s => s.UnitId == unitId && s.BedId == bedId && s.Until == null, cancellationToken);
 
     public static Task<string> LastBedAsync(UnitVentDbContext db, EpisodeRow episode, CancellationToken cancellationToken) =>

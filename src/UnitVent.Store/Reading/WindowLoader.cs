@@ -17,7 +17,7 @@ internal static class WindowLoader
     public static readonly Duration Span = Duration.FromHours(48);
 
     // Per episode: everything of the span; states (context, targets, phase, method, events, follow-ups) however old; the last of every other kind before.
-    private const string EntriesSql = """
+    internal const string EntriesSql = """
         select e.*
         from unnest({1}) as wanted(id)
         cross join lateral (
