@@ -1,3 +1,5 @@
+using NodaTime;
+
 namespace UnitVent.Charting.Pictures;
 
 /// <summary>Turns inputs into a value, or into the reason why there is none. Nothing that was charted makes it throw.</summary>
@@ -47,7 +49,11 @@ internal readonly record struct Formula(string Name, string Unit, string Equatio
 
     private static string? FirstDoubt(Given[] inputs) => inputs.FirstOrDefault(g => g.State == ValueState.Validity).Because;
 
-    private static NodaTime.Instant? Oldest(Given[] inputs) => inputs.Where(g => g.At is not null).Select(g => g.At).DefaultIfEmpty(null).Min();
+    private static Instant? Oldest(Given[] inputs)
+    {
+        var seen = inputs.Where(g => g.At is not null && !g.Holds).Select(g => g.At).ToList();
+        return (seen.Count > 0 ? seen : inputs.Where(g => g.At is not null).Select(g => g.At)).DefaultIfEmpty(null).Min();
+    }
 
     private static Reading[] Readings(Given[] inputs) => Array.ConvertAll(inputs, g => g.Reading);
 }

@@ -10,6 +10,9 @@ internal readonly record struct Given(string Name, string Label, string Unit, do
 
     public string? Because { get; init; }
 
+    /// <summary>Whether it holds from its time on, as settings do, so that its time says nothing of the age of what is computed from it.</summary>
+    public bool Holds { get; init; }
+
     public Reading Reading => new(Name, State is ValueState.Ok or ValueState.Validity ? Value : null, Unit, At, Entry);
 
     public static Given Missing(string name, string label, string unit = "") =>

@@ -82,7 +82,7 @@ internal sealed class PictureSources
 
     public static Given Setting(Charted<SettingChange>? settings, string name, string label, string unit, Func<SettingChange, decimal?> member) =>
         settings is { } s && member(s.Body) is { } value
-            ? new Given(name, label, unit, (double)value, s.At, s.Id)
+            ? new Given(name, label, unit, (double)value, s.At, s.Id) { Holds = true }
             : Given.Missing(name, label, unit);
 
     private Instant? Confirmed()

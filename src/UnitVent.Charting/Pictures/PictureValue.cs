@@ -10,7 +10,7 @@ namespace UnitVent.Charting.Pictures;
 /// <param name="Because">One sentence when the state is not <see cref="ValueState.Ok"/>; null otherwise.</param>
 /// <param name="Kind">Where it comes from.</param>
 /// <param name="Equation">The equation's id; empty for measured values.</param>
-/// <param name="AsOf">The time of its oldest timed input; null when it has none.</param>
+/// <param name="AsOf">The time of its oldest reading; of its settings when it rests on nothing else; null without either.</param>
 /// <param name="Inputs">What it was made from.</param>
 public sealed record PictureValue(
     string Name,

@@ -206,6 +206,15 @@ public sealed class PictureValueTests
     }
 
     [Fact]
+    public void AsOf_IsTheReadingsTime_AndTheSettingsOnlyWhenNothingWasRead()
+    {
+        var picture = Chart.Round().Picture();
+
+        Assert.Equal(Chart.Ago(25), picture[ValueNames.SpontaneousSharePercent].AsOf);
+        Assert.Equal(Chart.Ago(600), picture[ValueNames.CycleTimeS].AsOf);
+    }
+
+    [Fact]
     public void EveryValue_HasAnEquationInWords_OrIsRead() =>
         Assert.All(Chart.Round().Picture().Values.Values.Where(v => v.Equation.Length > 0), v => Assert.NotNull(Equations.Behind(v.Name)));
 
