@@ -1,4 +1,5 @@
 using System.Text.Json;
+using UnitVent.Charting.Entries;
 using UnitVent.Charting.Results;
 
 namespace UnitVent.Web.Api;
@@ -9,16 +10,18 @@ internal sealed class Envelope
     private const int MostConfirmed = 40;
 
     private readonly Dictionary<string, JsonElement> members;
-    private readonly Guid? id;
     private readonly Guid? corrects;
     private readonly string? correctionReason;
     private readonly IReadOnlyList<string> confirmed;
 
-    public Envelope(JsonElement body, bool corrections)
+    /// <param name="body">The object that was sent.</param>
+    /// <param name="corrections">Whether it may correct another.</param>
+    /// <param name="idOtherwise">The id when none was sent; null where one is needed.</param>
+    public Envelope(JsonElement body, bool corrections, Guid? idOtherwise = null)
     {
         members = body.EnumerateObject().ToDictionary(m => m.Name, m => m.Value);
-        id = Identifier("id");
-        if (id is null && Errors.Count == 0)
+        Id = Identifier("id") ?? idOtherwise;
+        if (Id is null && Errors.Count == 0)
         {
             Errors.Add(new("id", "missing", "An id made by the caller is needed (UUID version 7)."));
         }
@@ -33,12 +36,16 @@ internal sealed class Envelope
         Rest = JsonSerializer.SerializeToElement(members);
     }
 
+    public Guid? Id { get; }
+
     public List<FieldError> Errors { get; } = [];
 
+    /// <summary>The other members.</summary>
     public JsonElement Rest { get; }
 
-    public Sent<object> Around(object body) =>
-        new(id!.Value, body) { Confirmed = confirmed, Corrects = corrects, CorrectionReason = correctionReason };
+    public Sent<object> Around(object body) => new(Id!.Value, body) { Confirmed = confirmed, Corrects = corrects, CorrectionReason = correctionReason };
+
+    public NewEntry Entry(Entry body) => new(Id!.Value, body) { Confirmed = confirmed, Corrects = corrects, CorrectionReason = correctionReason };
 
     private Guid? Identifier(string name)
     {

@@ -15,11 +15,28 @@ public static class Problems
             statusCode: status,
             title: title,
             detail: errors[0].Message,
-            extensions: new Dictionary<string, object?> { ["errors"] = errors.Select(e => new { e.Field, e.Code, e.Message }) });
+            extensions: new Dictionary<string, object?> { ["errors"] = errors.Select(e => new Reason(e.Field, e.Code, e.Message)) });
     }
 
-    public static IResult NotHere() =>
-        Of(Refusal.NotFound, [new FieldError("", "notFound", "There is no such thing in the units that this token sees.")]);
+    /// <summary>The answer to a missing, unknown, revoked or expired token.</summary>
+    public static IResult Unknown() => TypedResults.Problem(
+        statusCode: StatusCodes.Status401Unauthorized,
+        title: "A valid bearer token is needed.",
+        detail: "The token is missing, unknown, revoked or expired.");
+
+    public static IResult NotHere() => Of(Refusal.NotFound, [new FieldError("", "not-found", "There is no such address.")]);
+
+    public static IResult StoreIsAway() => Of(Refusal.Unavailable, [new FieldError("", "store.unavailable", "The store did not answer.")]);
+
+    public static IResult TooMany() => TypedResults.Problem(
+        statusCode: StatusCodes.Status429TooManyRequests,
+        title: "Too many requests.",
+        detail: "Wait as long as the Retry-After header says.");
+
+    public static IResult Failed(int status, string reference) => TypedResults.Problem(
+        statusCode: status,
+        title: status == StatusCodes.Status413PayloadTooLarge ? "The body is too long." : "The request could not be carried out.",
+        detail: $"Reference {reference}.");
 
     private static (int Status, string Title) Meaning(Refusal refusal) => refusal switch
     {
@@ -30,4 +47,6 @@ public static class Problems
         Refusal.Conflict => (StatusCodes.Status409Conflict, "The state forbids it."),
         Refusal.Unavailable => (StatusCodes.Status503ServiceUnavailable, "The store did not answer; nothing was written."),
     };
+
+    private sealed record Reason(string Field, string Code, string Message);
 }

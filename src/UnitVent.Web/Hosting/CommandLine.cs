@@ -6,7 +6,7 @@ namespace UnitVent.Web.Hosting;
 public static class CommandLine
 {
     private static readonly Option<bool> Demo = new("--demo") { Description = "Fill the invented unit DEMO, topped up to now." };
-    private static readonly Option<bool> Empty = new("--empty") { Description = "Start without users and print a one-time set-up secret." };
+    private static readonly Option<bool> Empty = new("--empty") { Description = "Print a one-time secret for the set-up page, while nobody can sign in." };
 
     public static RootCommand Create()
     {
@@ -15,7 +15,13 @@ public static class CommandLine
         foreach (var command in new[] { root, serve })
         {
             command.TreatUnmatchedTokensAsErrors = false;
-            command.SetAction((parse, cancel) => Serve.RunAsync(new(parse.GetValue(Demo), parse.GetValue(Empty), [.. parse.UnmatchedTokens]), cancel));
+            command.SetAction((parse, cancel) => Spoken.RunAsync(
+                () => Serve.RunAsync(new(parse.GetValue(Demo), parse.GetValue(Empty), [.. parse.UnmatchedTokens]), cancel)));
+        }
+
+        foreach (var verb in Verbs.All())
+        {
+            root.Add(verb);
         }
 
         return root;

@@ -1,3 +1,5 @@
+using System.Data.Common;
+using UnitVent.Store;
 using UnitVent.Store.Cluster;
 
 namespace UnitVent.Web.Hosting;
@@ -34,5 +36,18 @@ public sealed class Database : IAsyncDisposable
         }
     }
 
+    /// <summary>Brings the tables to the shape that this program needs.</summary>
+    public Task MigrateAsync(CancellationToken cancel) => StoreMigrations.MigrateAsync(OwnerConnection, Part("Username", "User ID", "User Name", "User"), cancel);
+
+    /// <summary>A secret that stays the same from start to start and that only this installation knows.</summary>
+    internal string InstallationSecret => Part("Password", "PWD");
+
     public ValueTask DisposeAsync() => cluster?.DisposeAsync() ?? ValueTask.CompletedTask;
+
+    private string Part(params string[] names)
+    {
+        var parts = new DbConnectionStringBuilder { ConnectionString = RuntimeConnection };
+        return names.Where(parts.ContainsKey).Select(n => (string)parts[n]).FirstOrDefault()
+            ?? throw new InvalidOperationException($"The run-time connection string says nothing of {names[0]}.");
+    }
 }

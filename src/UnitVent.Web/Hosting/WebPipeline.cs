@@ -1,3 +1,6 @@
+using UnitVent.Web.Account;
+using UnitVent.Web.Api;
+
 namespace UnitVent.Web.Hosting;
 
 /// <summary>The way of a request through the program.</summary>
@@ -7,20 +10,35 @@ public static class WebPipeline
     {
         app.UseForwardedHeaders();
         app.UseSecurityHeaders();
-        app.UseExceptionHandler("/failed");
         app.UseHsts();
+        app.UseWhen(IsApi, api => api.UseApiProblems());
+        app.UseWhen(http => !IsApi(http), pages =>
+        {
+            pages.UseExceptionHandler("/failed");
+            pages.UseStatusCodePagesWithReExecute("/not-found");
+        });
+        app.UseRouting();
         app.UseSameOriginCircuits();
         app.UseCookiePolicy();
         app.UseRateLimiter();
         app.UseAuthentication();
         app.UseAuthorization();
         app.UseAntiforgery();
+        app.Map();
+    }
+
+    private static void Map(this WebApplication app)
+    {
         app.MapStaticAssets().AllowAnonymous();
         app.MapHealth();
+        app.MapAccount();
+        app.MapApi();
         app.MapRazorComponents<App>().AddInteractiveServerRenderMode(circuits =>
         {
             circuits.DisableWebSocketCompression = true;
             circuits.ContentSecurityFrameAncestorsPolicy = null;
         });
     }
+
+    private static bool IsApi(HttpContext http) => http.Request.Path.StartsWithSegments(ApiEndpoints.Root);
 }

@@ -2,6 +2,9 @@ using Microsoft.AspNetCore.Antiforgery;
 using Microsoft.AspNetCore.CookiePolicy;
 using Microsoft.AspNetCore.HttpOverrides;
 using MudBlazor.Services;
+using UnitVent.Web.Account;
+using UnitVent.Web.Api;
+using UnitVent.Web.Handover;
 using UnitVent.Web.Shared;
 
 namespace UnitVent.Web.Hosting;
@@ -21,10 +24,12 @@ public static class WebServices
             kestrel.Limits.MaxRequestBodySize = BodyLimitBytes;
         });
         builder.Services.AddScreens();
-        builder.Services.AddSignIn();
+        builder.Services.AddAccounts();
         builder.Services.AddCookieRules();
         builder.Services.Configure<ForwardedHeadersOptions>(o => o.ForwardedHeaders = ForwardedHeaders.XForwardedFor | ForwardedHeaders.XForwardedProto);
         builder.Services.AddRateLimits();
+        builder.Services.AddApi();
+        builder.Services.AddSingleton<Sheets>();
     }
 
     private static void AddScreens(this IServiceCollection services)
@@ -39,6 +44,7 @@ public static class WebServices
         }).AddHubOptions(hub => hub.MaximumReceiveMessageSize = HubMessageLimitBytes);
         services.AddMudServices();
         services.AddScoped<CircuitSession>();
+        services.AddScoped<CurrentActor>();
         services.AddScoped<UnitInView>();
     }
 

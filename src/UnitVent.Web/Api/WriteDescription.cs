@@ -8,12 +8,13 @@ namespace UnitVent.Web.Api;
 
 /// <summary>Says in the OpenAPI document what a write takes: the fields of a type, and what every write carries.</summary>
 /// <param name="Type">A type whose members have fields.</param>
-public sealed record EntryBody(Type Type)
+/// <param name="Corrections">Whether it may correct another.</param>
+public sealed record WriteDescription(Type Type, bool Corrections = false)
 {
     /// <summary>Describes the body of an operation whose endpoint carries this.</summary>
-    public static Task Describe(OpenApiOperation operation, OpenApiOperationTransformerContext context, CancellationToken cancel)
+    public static Task AddBodyAsync(OpenApiOperation operation, OpenApiOperationTransformerContext context, CancellationToken cancel)
     {
-        if (context.Description.ActionDescriptor.EndpointMetadata.OfType<EntryBody>().FirstOrDefault() is { } body)
+        if (context.Description.ActionDescriptor.EndpointMetadata.OfType<WriteDescription>().FirstOrDefault() is { } body)
         {
             operation.RequestBody = new OpenApiRequestBody
             {
@@ -22,6 +23,21 @@ public sealed record EntryBody(Type Type)
             };
         }
 
+        return Task.CompletedTask;
+    }
+
+    /// <summary>Describes the interface as a whole.</summary>
+    public static Task AddHeadAsync(OpenApiDocument document, OpenApiDocumentTransformerContext context, CancellationToken cancel)
+    {
+        document.Info.Title = "UnitVent";
+        document.Info.Description = "What is charted about ventilated patients, and what is computed from it. Observations, not orders.";
+        document.Servers = [];
+        document.Components ??= new OpenApiComponents();
+        document.Components.SecuritySchemes = new Dictionary<string, IOpenApiSecurityScheme>
+        {
+            ["token"] = new OpenApiSecurityScheme { Type = SecuritySchemeType.Http, Scheme = "bearer", Description = "Made by an administrator for one unit and role." },
+        };
+        document.Security = [new OpenApiSecurityRequirement { [new OpenApiSecuritySchemeReference("token", document)] = [] }];
         return Task.CompletedTask;
     }
 
@@ -36,6 +52,12 @@ public sealed record EntryBody(Type Type)
             Items = new OpenApiSchema { Type = JsonSchemaType.String },
             Description = "Codes of the questions answered with yes.",
         };
+        if (Corrections)
+        {
+            members["corrects"] = new OpenApiSchema { Type = JsonSchemaType.String, Format = "uuid", Description = "The entry that this one replaces." };
+            members["correctionReason"] = new OpenApiSchema { Type = JsonSchemaType.String, Description = "Why; needed with corrects." };
+        }
+
         return new OpenApiSchema
         {
             Type = JsonSchemaType.Object,
@@ -63,4 +85,10 @@ public sealed record EntryBody(Type Type)
         FieldKind.YesNo => JsonSchemaType.Boolean,
         FieldKind.Text or FieldKind.Time or FieldKind.Date or FieldKind.Choice => JsonSchemaType.String,
     };
+}
+
+/// <summary>Marks endpoints that take a write.</summary>
+public static class WriteMarks
+{
+    public static RouteHandlerBuilder Writes<T>(this RouteHandlerBuilder endpoint) => endpoint.WithMetadata(new WriteDescription(typeof(T)));
 }
