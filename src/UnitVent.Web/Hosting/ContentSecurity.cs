@@ -17,6 +17,9 @@ public static class ContentSecurity
         "sha256-HEp7NBRAdgtRngCu51EuO44adVHptCXULj/ggGmLMOw=",
     ];
 
+    /// <summary>For sheets: the browser's own viewer brings its own scripts and styles.</summary>
+    public const string ForSheets = "frame-ancestors 'none'";
+
     /// <summary>The nonce of this response; made on first use.</summary>
     public static string NonceOf(HttpContext http)
     {

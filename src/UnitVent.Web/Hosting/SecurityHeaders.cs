@@ -30,7 +30,7 @@ public static class SecurityHeaders
     {
         var http = (HttpContext)state;
         var headers = http.Response.Headers;
-        headers.ContentSecurityPolicy = ContentSecurity.PolicyFor(http);
+        headers.ContentSecurityPolicy = http.Response.ContentType == "application/pdf" ? ContentSecurity.ForSheets : ContentSecurity.PolicyFor(http);
         headers.XContentTypeOptions = "nosniff";
         headers["Referrer-Policy"] = "no-referrer";
         headers["Permissions-Policy"] = "camera=(), geolocation=(), microphone=(), payment=(), usb=()";

@@ -1,5 +1,6 @@
 using UnitVent.Web.Account;
 using UnitVent.Web.Api;
+using UnitVent.Web.Handover;
 
 namespace UnitVent.Web.Hosting;
 
@@ -33,6 +34,7 @@ public static class WebPipeline
         app.MapHealth();
         app.MapAccount();
         app.MapApi();
+        app.MapSheetPages();
         app.MapRazorComponents<App>().AddInteractiveServerRenderMode(circuits =>
         {
             circuits.DisableWebSocketCompression = true;

@@ -17,6 +17,7 @@ public static class WebServices
 
     public static void AddWeb(this WebApplicationBuilder builder)
     {
+        builder.Logging.AddFilter("Microsoft", LogLevel.Warning).AddFilter("Microsoft.Hosting.Lifetime", LogLevel.Information);
         builder.WebHost.UseStaticWebAssets();
         builder.WebHost.ConfigureKestrel(kestrel =>
         {
