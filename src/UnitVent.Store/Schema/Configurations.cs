@@ -145,6 +145,7 @@ internal sealed class FlagEventConfiguration : IEntityTypeConfiguration<FlagEven
     public void Configure(EntityTypeBuilder<FlagEventRow> builder)
     {
         builder.ToTable("flag_event").HasKey(e => new { e.UnitId, e.Id });
+        builder.HasIndex(e => e.Id).IsUnique();
         builder.HasIndex(e => new { e.UnitId, e.FlagId });
         builder.Property(e => e.Finding).HasColumnType("jsonb");
         builder.Property(e => e.InHand).HasColumnType("jsonb");

@@ -50,10 +50,23 @@ internal sealed class UnitVentDbContext(DbContextOptions<UnitVentDbContext> opti
     {
         base.OnModelCreating(builder);
         builder.ApplyConfigurationsFromAssembly(typeof(UnitVentDbContext).Assembly);
+        NamePeople(builder);
     }
 
     protected override void ConfigureConventions(ModelConfigurationBuilder configurationBuilder)
     {
         configurationBuilder.Properties<Enum>().HaveConversion<string>();
+    }
+
+    // Identity names its tables itself, past the naming convention.
+    private static void NamePeople(ModelBuilder builder)
+    {
+        builder.Entity<Account>().ToTable("account");
+        builder.Entity<IdentityUserClaim<Guid>>().ToTable("account_claim");
+        builder.Entity<IdentityUserLogin<Guid>>().ToTable("account_login");
+        builder.Entity<IdentityUserToken<Guid>>().ToTable("account_token");
+        builder.Entity<IdentityUserRole<Guid>>().ToTable("account_role");
+        builder.Entity<IdentityRole<Guid>>().ToTable("role");
+        builder.Entity<IdentityRoleClaim<Guid>>().ToTable("role_claim");
     }
 }

@@ -8,12 +8,11 @@ begin
     loop
         execute format('grant select, insert on %I to %I', t, '{role}');
     end loop;
-    foreach t in array array['unit', 'bed', 'patient', 'episode', 'bed_stay', 'flag', 'membership', 'api_token', 'set_up', 'data_protection_keys']
+    foreach t in array array['unit', 'bed', 'patient', 'episode', 'bed_stay', 'flag', 'api_token', 'set_up', 'data_protection_keys']
     loop
         execute format('grant select, insert, update on %I to %I', t, '{role}');
     end loop;
-    for t in select c.relname from pg_class c join pg_namespace n on n.oid = c.relnamespace
-             where n.nspname = 'public' and c.relkind = 'r' and c.relname like 'asp_net_%' or c.relname = 'membership'
+    foreach t in array array['membership', 'account', 'account_claim', 'account_login', 'account_token', 'account_role', 'role', 'role_claim']
     loop
         execute format('grant select, insert, update, delete on %I to %I', t, '{role}');
     end loop;

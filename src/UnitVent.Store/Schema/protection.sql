@@ -84,8 +84,9 @@ create function audit_first_bad() returns table (number bigint) language sql sta
         union all
         select h.number
         from audit_head h
+        left join audit_event e on e.unit_id = h.unit_id and e.number = h.number
         where h.unit_id = (select unit_in_scope())
-          and h.number <> (select coalesce(max(e.number), 0) from audit_event e)
+          and (e.hash is distinct from h.hash or exists (select from audit_event later where later.number > h.number))
     )
     select min(b.number) from bad b having min(b.number) is not null
 $$;
