@@ -3,6 +3,7 @@ using Microsoft.AspNetCore.CookiePolicy;
 using Microsoft.AspNetCore.HttpOverrides;
 using MudBlazor.Services;
 using UnitVent.Web.Account;
+using UnitVent.Web.Admin;
 using UnitVent.Web.Api;
 using UnitVent.Web.Handover;
 using UnitVent.Web.Shared;
@@ -47,6 +48,7 @@ public static class WebServices
         services.AddScoped<CircuitSession>();
         services.AddScoped<CurrentActor>();
         services.AddScoped<UnitInView>();
+        services.AddScoped<AdminDesks>();
     }
 
     /// <summary>Every cookie is Secure. The antiforgery cookie would refuse plain HTTP on loopback if it were told so itself; the policy adds it.</summary>
