@@ -1,5 +1,6 @@
 using System.Net.Sockets;
 using Microsoft.EntityFrameworkCore;
+using Microsoft.EntityFrameworkCore.Storage;
 using Npgsql;
 using UnitVent.Charting.Results;
 using UnitVent.Store.People;
@@ -10,10 +11,13 @@ namespace UnitVent.Store;
 /// <summary>The one place where a unit's data is reached: checks the membership, opens a transaction, names the unit to the database.</summary>
 internal sealed class UnitScope(IDbContextFactory<UnitVentDbContext> contexts)
 {
+    // PostgreSQL, appendix A: connection, rolled back, out of resources, not in a state for it, operator, system, internal.
+    private static readonly HashSet<string> ClassesOfTrouble = ["08", "40", "53", "55", "57", "58", "XX"];
+
     /// <summary>Finds what an id belongs to and works in its unit. Another unit's id answers as if absent.</summary>
     public Task<Result<T>> WithAsync<T>(
         Actor actor, Guid id, string what, Operation operation, Func<UnitVentDbContext, Place, Task<Result<T>>> work, CancellationToken cancellationToken) =>
-        GuardedAsync(async () =>
+        SettledAsync(async () =>
         {
             await using var db = await contexts.CreateDbContextAsync(cancellationToken);
             var found = await db.UnitLookups.AsNoTracking().FirstOrDefaultAsync(l => l.Id == id, cancellationToken);
@@ -25,7 +29,7 @@ internal sealed class UnitScope(IDbContextFactory<UnitVentDbContext> contexts)
     /// <summary>Works in the unit with a code. A unit that the actor may not see answers as if absent.</summary>
     public Task<Result<T>> WithUnitAsync<T>(
         Actor actor, string code, Operation operation, Func<UnitVentDbContext, Place, Task<Result<T>>> work, CancellationToken cancellationToken) =>
-        GuardedAsync(async () =>
+        SettledAsync(async () =>
         {
             await using var db = await contexts.CreateDbContextAsync(cancellationToken);
             var unit = await db.Units.AsNoTracking().Where(u => u.Code == code).Select(u => (Guid?)u.Id).FirstOrDefaultAsync(cancellationToken);
@@ -57,32 +61,77 @@ internal sealed class UnitScope(IDbContextFactory<UnitVentDbContext> contexts)
         {
             return await work();
         }
+        catch (CommitLostException)
+        {
+            return Refusals.OutcomeUnknown<T>();
+        }
+        catch (DbUpdateConcurrencyException)
+        {
+            return Refusals.ChangedMeanwhile<T>();
+        }
+        catch (DbUpdateException e) when (UniqueViolation.Is(e))
+        {
+            return Refusals.IdUsed<T>();
+        }
         catch (Exception e) when (IsUnavailable(e))
         {
             return Refusals.Unavailable<T>();
         }
     }
 
+    // Whether a commit took cannot be told when its answer is lost. Everything in a unit carries an id of its caller's, so it is
+    // looked for once more: what had been saved is found again, what had not is saved now.
+    private static Task<Result<T>> SettledAsync<T>(Func<Task<Result<T>>> work) => GuardedAsync(async () =>
+    {
+        try
+        {
+            return await work();
+        }
+        catch (CommitLostException)
+        {
+            var again = await GuardedAsync(work);
+            return again.Refusal == Refusal.Unavailable ? Refusals.OutcomeUnknown<T>() : again;
+        }
+    });
+
     private static async Task<Result<T>> InTransactionAsync<T>(
         UnitVentDbContext db, Place place, Func<UnitVentDbContext, Place, Task<Result<T>>> work, CancellationToken cancellationToken)
     {
         await using var transaction = await db.Database.BeginTransactionAsync(cancellationToken);
-        await db.Database.ExecuteSqlAsync($"select set_config('unitvent.unit', {place.UnitId.ToString()}, true)", cancellationToken);
+        await NameUnitAsync(db, place.UnitId, cancellationToken);
         var result = await work(db, place);
         if (result.Succeeded)
         {
-            await transaction.CommitAsync(cancellationToken);
+            await CommitAsync(transaction);
         }
 
         return result;
     }
 
-    // What ends the connection (FATAL), class 08 (connection) and class 53 (out of resources) are nobody's doing who charts.
+    /// <summary>Names the unit to row-level security until the transaction ends.</summary>
+    public static Task NameUnitAsync(UnitVentDbContext db, Guid unitId, CancellationToken cancellationToken) =>
+        db.Database.ExecuteSqlAsync($"select set_config('unitvent.unit', {unitId.ToString()}, true)", cancellationToken);
+
+    /// <summary>Commits. Nobody gives up half-way: the outcome would be unknown.</summary>
+    /// <exception cref="CommitLostException">The answer was lost.</exception>
+    public static async Task CommitAsync(IDbContextTransaction transaction)
+    {
+        try
+        {
+            await transaction.CommitAsync(CancellationToken.None);
+        }
+        catch (Exception e) when (IsUnavailable(e))
+        {
+            throw new CommitLostException(e);
+        }
+    }
+
+    // What ends the connection (FATAL), and the classes of errors that are nobody's doing who charts.
     private static bool IsUnavailable(Exception exception) => exception switch
     {
         PostgresException postgres => postgres.InvariantSeverity is "FATAL" or "PANIC"
-            || postgres.SqlState.StartsWith("08", StringComparison.Ordinal)
-            || postgres.SqlState.StartsWith("53", StringComparison.Ordinal),
+            || postgres.SqlState == PostgresErrorCodes.ReadOnlySqlTransaction
+            || ClassesOfTrouble.Contains(postgres.SqlState[..2]),
         NpgsqlException or TimeoutException or SocketException => true,
         DbUpdateException { InnerException: { } inner } => IsUnavailable(inner),
         InvalidOperationException { InnerException: { } inner } => IsUnavailable(inner),

@@ -1,16 +1,15 @@
 using System.Security.Cryptography;
 using System.Text;
+using System.Text.Json;
 using Microsoft.EntityFrameworkCore;
 using NodaTime;
 using UnitVent.Charting.Checking;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Episodes;
-using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Fields;
 using UnitVent.Charting.Results;
-using UnitVent.Store.Live;
 using UnitVent.Store.Model;
 using UnitVent.Store.People;
-using UnitVent.Store.Reading;
 using UnitVent.Store.Recording;
 using UnitVent.Store.Schema;
 
@@ -22,9 +21,12 @@ internal static class Admitting
     public static async Task<Result<AdmitReceipt>> AdmitAsync(
         UnitVentDbContext db, Guid unitId, Actor actor, Admission admission, Instant now, CancellationToken cancellationToken)
     {
-        if (await db.Episodes.AsNoTracking().AnyAsync(e => e.UnitId == unitId && e.Id == admission.Id, cancellationToken))
+        var asked = JsonSerializer.Serialize(admission, ChartJson.Options);
+        await db.Database.ExecuteSqlAsync($"select pg_advisory_xact_lock(hashtextextended({admission.Id.ToString()}, 0))", cancellationToken); // the same admission, one at a time
+        var before = await db.EpisodeEvents.AsNoTracking().FirstOrDefaultAsync(e => e.UnitId == unitId && e.Id == admission.Id, cancellationToken);
+        if (DeskStep.Before(before, admission.Id, "admit", asked) is { } stood)
         {
-            return Result<AdmitReceipt>.Of(new(admission.Id, true));
+            return stood.Succeeded ? Result<AdmitReceipt>.Of(new(stood.Value, true)) : stood.As<AdmitReceipt>();
         }
 
         var errors = AdmissionCheck.Verdict(admission, now);
@@ -35,11 +37,11 @@ internal static class Admitting
 
         return await BedStays.FindAsync(db, unitId, admission.Bed, cancellationToken) is null
             ? Result<AdmitReceipt>.Refused(Refusal.Value, "bed", "bed.unknown", $"There is no bed {admission.Bed} in this unit.")
-            : await InsertAsync(db, unitId, actor, admission, now, cancellationToken);
+            : await InsertAsync(db, unitId, actor, admission, asked, now, cancellationToken);
     }
 
     private static async Task<Result<AdmitReceipt>> InsertAsync(
-        UnitVentDbContext db, Guid unitId, Actor actor, Admission admission, Instant now, CancellationToken cancellationToken)
+        UnitVentDbContext db, Guid unitId, Actor actor, Admission admission, string asked, Instant now, CancellationToken cancellationToken)
     {
         var patient = await PatientAsync(db, unitId, actor, admission.Patient, now, cancellationToken);
         var episode = new EpisodeRow
@@ -53,29 +55,28 @@ internal static class Admitting
             return Refusals.BedTaken<AdmitReceipt>(admission.Bed);
         }
 
-        new DeskStep(db, episode, admission.Id, "admit", actor, now).Done(admission.Bed);
+        new DeskStep(db, episode, admission.Id, "admit", asked, actor, now).Done();
         db.Entries.AddRange(Circumstances(admission, now).Select(e => EntryRow.Of(unitId, episode.Id, e, now, actor)));
         try
         {
             await db.SaveChangesAsync(cancellationToken);
         }
-        catch (DbUpdateException e) when (UniqueViolation.Is(e))
+        catch (DbUpdateException e) when (UniqueViolation.Is(e, BedStayConfiguration.OnePatientABed))
         {
-            return Lost(e, admission);
+            return Refusals.BedTaken<AdmitReceipt>(admission.Bed);
+        }
+        catch (DbUpdateException e) when (IsPatientTwice(e))
+        {
+            return Refusals.PatientAdmitted<AdmitReceipt>();
         }
 
-        var window = await WindowLoader.OfEpisodeAsync(db, new Place(unitId, episode.Id), now, cancellationToken) ?? throw new InvalidOperationException("A new episode has a window.");
-        await Evaluation.CarryOnAsync(db, episode, PatientPicture.At(window, now), Evaluation.Program, cancellationToken);
-        await db.SaveChangesAsync(cancellationToken);
-        await Notices.SendAsync(db, unitId, cancellationToken);
+        await Evaluation.AgainAsync(db, new Place(unitId, episode.Id), episode, now, cancellationToken);
         return Result<AdmitReceipt>.Of(new(episode.Id, false));
     }
 
-    private static Result<AdmitReceipt> Lost(DbUpdateException exception, Admission admission) =>
-        UniqueViolation.Is(exception, BedStayConfiguration.OnePatientABed) ? Refusals.BedTaken<AdmitReceipt>(admission.Bed)
-        : UniqueViolation.Is(exception, EpisodeConfiguration.OneEpisodeAPatient) || UniqueViolation.Is(exception, PatientConfiguration.OneMrnAUnit)
-            ? Result<AdmitReceipt>.Refused(Refusal.Conflict, "patient.mrn", "patient.admitted", "This patient is admitted in the unit already.")
-            : Refusals.IdUsed<AdmitReceipt>();
+    /// <summary>Whether a save failed because the patient is in the unit already.</summary>
+    public static bool IsPatientTwice(DbUpdateException exception) =>
+        UniqueViolation.Is(exception, EpisodeConfiguration.OneEpisodeAPatient) || UniqueViolation.Is(exception, PatientConfiguration.OneMrnAUnit);
 
     private static async Task<PatientRow> PatientAsync(
         UnitVentDbContext db, Guid unitId, Actor actor, PatientFacts facts, Instant now, CancellationToken cancellationToken)

@@ -39,7 +39,7 @@ internal static class BedStays
 
     public static Task<string> LastBedAsync(UnitVentDbContext db, EpisodeRow episode, CancellationToken cancellationToken) =>
         db.BedStays.Where(s => s.UnitId == episode.UnitId && s.EpisodeId == episode.Id)
-            .OrderByDescending(s => s.From)
+            .OrderByDescending(s => s.From).ThenByDescending(s => s.Until)
             .Join(db.Beds, s => new { s.UnitId, Id = s.BedId }, b => new { b.UnitId, b.Id }, (s, b) => b.Name)
             .FirstAsync(cancellationToken);
 }

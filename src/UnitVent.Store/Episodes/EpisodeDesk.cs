@@ -1,7 +1,9 @@
+using System.Text.Json;
 using Microsoft.EntityFrameworkCore;
 using NodaTime;
 using UnitVent.Charting.Checking;
 using UnitVent.Charting.Episodes;
+using UnitVent.Charting.Fields;
 using UnitVent.Charting.Results;
 using UnitVent.Store.Live;
 using UnitVent.Store.People;
@@ -26,7 +28,7 @@ public sealed class EpisodeDesk
 
     /// <summary>Moves the patient to another bed of the unit.</summary>
     public Task<Result<Guid>> MoveAsync(Actor actor, Guid episodeId, Guid id, string bed, CancellationToken cancellationToken) =>
-        DoAsync(actor, episodeId, id, "move", async step =>
+        DoAsync(actor, episodeId, id, "move", bed, async step =>
         {
             if (step.Episode.EndedAt is not null)
             {
@@ -35,30 +37,31 @@ public sealed class EpisodeDesk
 
             await BedStays.LeaveAsync(step.Db, step.Episode, step.Now, cancellationToken);
             await step.Db.SaveChangesAsync(cancellationToken);
-            return await BedStays.TakeAsync(step.Db, step.Episode, bed, step.Now, cancellationToken) ? step.Done(bed) : Refusals.BedTaken<Guid>(bed);
+            return await BedStays.TakeAsync(step.Db, step.Episode, bed, step.Now, cancellationToken) ? step.Done() : Refusals.BedTaken<Guid>(bed);
         }, cancellationToken);
 
     /// <summary>Ends the episode; late entries are taken for another day.</summary>
     public Task<Result<Guid>> EndAsync(Actor actor, Guid episodeId, Guid id, Instant endedAt, Outcome outcome, CancellationToken cancellationToken) =>
-        DoAsync(actor, episodeId, id, "end", async step =>
+        DoAsync(actor, episodeId, id, "end", $"{outcome} {endedAt}", async step =>
         {
             if (step.Episode.EndedAt is not null)
             {
                 return Refusals.Ended<Guid>();
             }
 
-            if (endedAt > step.Now + TimeCheck.Ahead || endedAt < step.Episode.AdmittedAt - ReopenWithin)
+            if (endedAt > step.Now + TimeCheck.Ahead || endedAt < step.Episode.AirwaySecuredAt)
             {
-                return Result<Guid>.Refused(Refusal.Value, "endedAt", "time.order", "The end lies in the future or before the admission.");
+                return Result<Guid>.Refused(Refusal.Value, "endedAt", "time.order", "The end lies in the future, or before the airway was secured.");
             }
 
-            await CloseAsync(step, Instant.Min(endedAt, step.Now), outcome, cancellationToken);
-            return step.Done(outcome.ToString());
+            var at = Instant.Min(endedAt, step.Now);
+            await CloseAsync(step, at, outcome, cancellationToken);
+            return step.Done(at);
         }, cancellationToken);
 
     /// <summary>Reopens an episode that ended within 48 h, in its last bed.</summary>
     public Task<Result<Guid>> ReopenAsync(Actor actor, Guid episodeId, Guid id, string reason, CancellationToken cancellationToken) =>
-        string.IsNullOrWhiteSpace(reason) ? Task.FromResult(Refusals.NeedsReason<Guid>()) : DoAsync(actor, episodeId, id, "reopen", async step =>
+        string.IsNullOrWhiteSpace(reason) ? Task.FromResult(Refusals.NeedsReason<Guid>()) : DoAsync(actor, episodeId, id, "reopen", reason, async step =>
         {
             if (step.Episode.EndedAt is not { } ended || step.Now - ended > ReopenWithin)
             {
@@ -67,12 +70,12 @@ public sealed class EpisodeDesk
 
             (step.Episode.EndedAt, step.Episode.Outcome, step.Episode.NextEvaluationAt) = (null, null, step.Now);
             var bed = await BedStays.LastBedAsync(step.Db, step.Episode, cancellationToken);
-            return await BedStays.TakeAsync(step.Db, step.Episode, bed, step.Now, cancellationToken) ? step.Done(reason) : Refusals.BedTaken<Guid>(bed);
+            return await BedStays.TakeAsync(step.Db, step.Episode, bed, step.Now, cancellationToken) ? step.Done() : Refusals.BedTaken<Guid>(bed);
         }, cancellationToken);
 
     /// <summary>Cancels a wrong admission.</summary>
     public Task<Result<Guid>> CancelAsync(Actor actor, Guid episodeId, Guid id, string reason, CancellationToken cancellationToken) =>
-        string.IsNullOrWhiteSpace(reason) ? Task.FromResult(Refusals.NeedsReason<Guid>()) : DoAsync(actor, episodeId, id, "cancel", async step =>
+        string.IsNullOrWhiteSpace(reason) ? Task.FromResult(Refusals.NeedsReason<Guid>()) : DoAsync(actor, episodeId, id, "cancel", reason, async step =>
         {
             if (step.Episode.EndedAt is not null)
             {
@@ -80,12 +83,13 @@ public sealed class EpisodeDesk
             }
 
             await CloseAsync(step, step.Now, Outcome.CancelledInError, cancellationToken);
-            return step.Done(reason);
+            return step.Done();
         }, cancellationToken);
 
     /// <summary>Corrects who the patient is; predicted body weight follows for the whole episode.</summary>
     public Task<Result<Guid>> CorrectPatientAsync(Actor actor, Guid episodeId, Guid id, PatientFacts patient, string reason, CancellationToken cancellationToken) =>
-        string.IsNullOrWhiteSpace(reason) ? Task.FromResult(Refusals.NeedsReason<Guid>()) : DoAsync(actor, episodeId, id, "patient", async step =>
+        string.IsNullOrWhiteSpace(reason) ? Task.FromResult(Refusals.NeedsReason<Guid>()) : DoAsync(
+            actor, episodeId, id, "patient", JsonSerializer.Serialize(new { reason, patient }, ChartJson.Options), async step =>
         {
             var errors = AdmissionCheck.Facts(patient, step.Now).Where(e => !e.IsAsk).ToList();
             if (errors.Count > 0)
@@ -96,7 +100,7 @@ public sealed class EpisodeDesk
             var head = await step.Db.Patients.FirstAsync(p => p.UnitId == step.Episode.UnitId && p.Id == step.Episode.PatientId, cancellationToken);
             PatientHeads.Change(step.Db, head, patient, step.Now, actor, reason);
             step.Episode.NextEvaluationAt = step.Now;
-            return step.Done(reason);
+            return step.Done();
         }, cancellationToken);
 
     private static async Task CloseAsync(DeskStep step, Instant at, Outcome outcome, CancellationToken cancellationToken)
@@ -105,7 +109,7 @@ public sealed class EpisodeDesk
         await BedStays.LeaveAsync(step.Db, step.Episode, at, cancellationToken);
     }
 
-    private Task<Result<Guid>> DoAsync(Actor actor, Guid episodeId, Guid id, string kind, Func<DeskStep, Task<Result<Guid>>> work, CancellationToken cancellationToken) =>
+    private Task<Result<Guid>> DoAsync(Actor actor, Guid episodeId, Guid id, string kind, string asked, Func<DeskStep, Task<Result<Guid>>> work, CancellationToken cancellationToken) =>
         scope.WithAsync(
             actor,
             episodeId,
@@ -114,13 +118,9 @@ public sealed class EpisodeDesk
             async (db, place) =>
             {
                 var episode = await Evaluation.LockAsync(db, place, cancellationToken);
-                if (await db.EpisodeEvents.AsNoTracking().FirstOrDefaultAsync(e => e.UnitId == place.UnitId && e.Id == id, cancellationToken) is { } before)
-                {
-                    return before.Kind == kind && before.EpisodeId == episodeId ? Result<Guid>.Of(id) : Refusals.IdUsed<Guid>();
-                }
-
-                var step = new DeskStep(db, episode, id, kind, actor, clock.GetCurrentInstant());
-                return await SavedAsync(step, work, cancellationToken);
+                var before = await db.EpisodeEvents.AsNoTracking().FirstOrDefaultAsync(e => e.UnitId == place.UnitId && e.Id == id, cancellationToken);
+                return DeskStep.Before(before, episodeId, kind, asked)
+                    ?? await SavedAsync(new DeskStep(db, episode, id, kind, asked, actor, clock.GetCurrentInstant()), work, cancellationToken);
             },
             cancellationToken);
 
@@ -140,6 +140,10 @@ public sealed class EpisodeDesk
         catch (DbUpdateException e) when (UniqueViolation.Is(e, BedStayConfiguration.OnePatientABed))
         {
             return Result<Guid>.Refused(Refusal.Conflict, "bed", "bed.taken", "The bed is taken.");
+        }
+        catch (DbUpdateException e) when (Admitting.IsPatientTwice(e))
+        {
+            return Refusals.PatientAdmitted<Guid>();
         }
     }
 }

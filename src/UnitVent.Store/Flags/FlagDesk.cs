@@ -1,10 +1,13 @@
+using System.Text.Json;
 using Microsoft.EntityFrameworkCore;
 using NodaTime;
+using UnitVent.Charting.Fields;
 using UnitVent.Charting.Flags;
 using UnitVent.Charting.Results;
 using UnitVent.Charting.Rules;
 using UnitVent.Store.Auditing;
 using UnitVent.Store.Live;
+using UnitVent.Store.Model;
 using UnitVent.Store.People;
 using UnitVent.Store.Recording;
 
@@ -41,9 +44,9 @@ public sealed class FlagDesk
             {
                 var episode = await Evaluation.LockAsync(db, place, cancellationToken);
                 var row = await db.Flags.FirstAsync(f => f.UnitId == place.UnitId && f.Id == flagId, cancellationToken);
-                if (await db.FlagEvents.AnyAsync(e => e.UnitId == place.UnitId && e.Id == id, cancellationToken))
+                if (await db.FlagEvents.AsNoTracking().FirstOrDefaultAsync(e => e.UnitId == place.UnitId && e.Id == id, cancellationToken) is { } before)
                 {
-                    return Result<Flag>.Of(row.ToFlag());
+                    return before.FlagId == flagId && IsSame(before, plan, until, toldWho, toldAt) ? Result<Flag>.Of(row.ToFlag()) : Refusals.IdUsed<Flag>();
                 }
 
                 var (now, flag) = (clock.GetCurrentInstant(), row.ToFlag());
@@ -64,6 +67,12 @@ public sealed class FlagDesk
                 return Result<Flag>.Of(row.ToFlag());
             },
             cancellationToken);
+
+    private static bool IsSame(FlagEventRow before, string? plan, Instant? until, string? toldWho, Instant? toldAt) =>
+        before is { Kind: FlagStepKind.Acknowledged, InHand: { } text }
+        && JsonSerializer.Deserialize<Acknowledgement>(text, ChartJson.Options)! is var hand
+        && (hand.Plan, hand.ToldWho, hand.ToldAt) == (plan, toldWho, toldAt)
+        && hand.Until == (until ?? hand.At + UrgentAtMost);
 
     private static Result<Flag>? Refused(Flag flag, Instant? until, Instant now)
     {

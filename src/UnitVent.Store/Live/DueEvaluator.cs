@@ -2,9 +2,7 @@ using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.Hosting;
 using Microsoft.Extensions.Logging;
 using NodaTime;
-using UnitVent.Charting.Pictures;
 using UnitVent.Charting.Results;
-using UnitVent.Store.Reading;
 using UnitVent.Store.Recording;
 using UnitVent.Store.Schema;
 
@@ -24,8 +22,11 @@ internal sealed class DueEvaluator(UnitScope scope, IClock clock, ILogger<DueEva
         var evaluated = 0;
         foreach (var unit in units.Succeeded ? units.Value : [])
         {
-            var done = await scope.WithinAsync(unit, (db, place) => OfUnitAsync(db, place.UnitId, cancellationToken), cancellationToken);
-            evaluated += done.Succeeded ? done.Value : 0;
+            var due = await scope.WithinAsync(unit, (db, place) => DueAsync(db, place.UnitId, cancellationToken), cancellationToken);
+            foreach (var episode in due.Succeeded ? due.Value : [])
+            {
+                evaluated += await TryAsync(unit, episode, cancellationToken) ? 1 : 0;
+            }
         }
 
         return evaluated;
@@ -37,51 +38,58 @@ internal sealed class DueEvaluator(UnitScope scope, IClock clock, ILogger<DueEva
         while (!stoppingToken.IsCancellationRequested)
         {
             await Task.Delay(Pause, stoppingToken).ConfigureAwait(ConfigureAwaitOptions.SuppressThrowing);
-            if (stoppingToken.IsCancellationRequested)
-            {
-                return;
-            }
-
             try
             {
                 await EvaluateDueAsync(stoppingToken);
             }
-            catch (Exception e) when (e is DbUpdateException or InvalidOperationException or OperationCanceledException)
+            catch (OperationCanceledException) when (stoppingToken.IsCancellationRequested)
             {
-                log.LogWarning("An evaluation failed and is tried again: {Error}", e.GetType().Name);
+                return;
             }
         }
     }
 
-    private async Task<Result<int>> OfUnitAsync(UnitVentDbContext db, Guid unitId, CancellationToken cancellationToken)
+    private async Task<Result<List<Guid>>> DueAsync(UnitVentDbContext db, Guid unitId, CancellationToken cancellationToken)
+    {
+        var now = clock.GetCurrentInstant();
+        return Result<List<Guid>>.Of(await db.Episodes.AsNoTracking()
+            .Where(e => e.UnitId == unitId && e.EndedAt == null && e.NextEvaluationAt <= now)
+            .Select(e => e.Id)
+            .ToListAsync(cancellationToken));
+    }
+
+    private async Task<bool> TryAsync(Guid unitId, Guid episodeId, CancellationToken cancellationToken)
+    {
+        try
+        {
+            var done = await scope.WithinAsync(unitId, (db, _) => EvaluateAsync(db, new Place(unitId, episodeId), cancellationToken), cancellationToken);
+            return done is { Succeeded: true, Value: true };
+        }
+#pragma warning disable CA1031 // One chart that cannot be evaluated must not keep the others from it.
+        catch (Exception e) when (e is not OperationCanceledException)
+#pragma warning restore CA1031
+        {
+            log.LogError("Episode {Episode} could not be evaluated: {Error}", episodeId, e.GetType().Name);
+            return false;
+        }
+    }
+
+    private async Task<Result<bool>> EvaluateAsync(UnitVentDbContext db, Place place, CancellationToken cancellationToken)
     {
         var mine = await db.Database.SqlQuery<bool>($"select pg_try_advisory_xact_lock({LeaseKey}) as \"Value\"").FirstAsync(cancellationToken);
         if (!mine)
         {
-            return Result<int>.Of(0);
+            return Result<bool>.Of(false);
         }
 
+        var episode = await Evaluation.LockAsync(db, place, cancellationToken);
         var now = clock.GetCurrentInstant();
-        var due = await db.Episodes.AsNoTracking()
-            .Where(e => e.UnitId == unitId && e.EndedAt == null && e.NextEvaluationAt <= now)
-            .Select(e => e.Id)
-            .ToListAsync(cancellationToken);
-        foreach (var id in due)
+        if (episode.EndedAt is not null || !(episode.NextEvaluationAt <= now))
         {
-            var place = new Place(unitId, id);
-            var episode = await Evaluation.LockAsync(db, place, cancellationToken);
-            if (await WindowLoader.OfEpisodeAsync(db, place, now, cancellationToken) is { } window)
-            {
-                await Evaluation.CarryOnAsync(db, episode, PatientPicture.At(window, now), Evaluation.Program, cancellationToken);
-                await db.SaveChangesAsync(cancellationToken);
-            }
+            return Result<bool>.Of(false);
         }
 
-        if (due.Count > 0)
-        {
-            await Notices.SendAsync(db, unitId, cancellationToken);
-        }
-
-        return Result<int>.Of(due.Count);
+        await Evaluation.AgainAsync(db, place, episode, now, cancellationToken);
+        return Result<bool>.Of(true);
     }
 }

@@ -19,6 +19,6 @@ internal sealed class EpisodeEventRow
 
     public string RecordedBy { get; set; } = "";
 
-    /// <summary>The bed, the outcome or the reason, whichever the kind has.</summary>
+    /// <summary>What was asked for, whole: the bed, the outcome, the reason, the facts, whichever the kind has.</summary>
     public string? Detail { get; set; }
 }

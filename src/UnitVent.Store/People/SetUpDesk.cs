@@ -5,6 +5,7 @@ using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.DependencyInjection;
 using NodaTime;
 using UnitVent.Charting.Results;
+using UnitVent.Store.Auditing;
 using UnitVent.Store.Model;
 using UnitVent.Store.Units;
 
@@ -71,18 +72,17 @@ public sealed class SetUpDesk
 
             row.DoneAt = clock.GetCurrentInstant();
             var account = new Account { Id = Guid.CreateVersion7(), UserName = userName.Trim(), DisplayName = displayName.Trim(), IsAdministrator = true };
-            await db.Database.ExecuteSqlAsync($"select set_config('unitvent.unit', {Guid.Empty.ToString()}, true)", cancellationToken);
-            var made = await users.CreateAsync(account, password);
+            await UnitScope.NameUnitAsync(db, AuditTrail.Everywhere, cancellationToken);
+            var made = UserDesk.Checked(await users.CreateAsync(account, password), account.Id);
             var added = UnitDesk.Add(db, unit, new Actor(account.Id, account.DisplayName, true, new Dictionary<Guid, UnitRole>()), row.DoneAt.Value);
-            List<FieldError> errors = [.. made.Errors.Select(e => new FieldError(e.Code.Contains("Password", StringComparison.Ordinal) ? "password" : "userName", "account." + e.Code, e.Description)), .. added.Errors];
-            if (errors.Count > 0)
+            if (!made.Succeeded || !added.Succeeded)
             {
-                return Result<bool>.Refused(Refusal.Value, errors);
+                return Result<bool>.Refused(Refusal.Value, [.. made.Errors, .. added.Errors]);
             }
 
             db.Memberships.Add(new MembershipRow { UnitId = added.Value, UserId = account.Id, Role = UnitRole.Physician });
             await db.SaveChangesAsync(cancellationToken);
-            await transaction.CommitAsync(cancellationToken);
+            await UnitScope.CommitAsync(transaction);
             return Result<bool>.Of(true);
         });
 

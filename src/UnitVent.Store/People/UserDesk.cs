@@ -6,12 +6,14 @@ using NodaTime;
 using UnitVent.Charting.Results;
 using UnitVent.Store.Auditing;
 using UnitVent.Store.Model;
+using UnitVent.Store.Schema;
 
 namespace UnitVent.Store.People;
 
 /// <summary>Keeps the people who sign in, and what they are in which unit.</summary>
 public sealed class UserDesk
 {
+    private const int LongestName = 120;
     private const int OneTimeCodeLength = 20;
     private const string CodeAlphabet = "abcdefghjkmnpqrstuvwxyz23456789";
 
@@ -27,43 +29,42 @@ public sealed class UserDesk
     /// <summary>Makes a person.</summary>
     /// <param name="actor">An administrator.</param>
     /// <param name="userName">The name to sign in with.</param>
-    /// <param name="displayName">The name on screens and entries.</param>
+    /// <param name="displayName">The name on screens and entries; 1–120 characters.</param>
     /// <param name="password">The first password; null for a one-time code that has to be changed.</param>
     /// <param name="isAdministrator">Whether the person administers.</param>
     /// <param name="cancellationToken">Gives up.</param>
     /// <returns>The password or one-time code to hand over, and the person's id.</returns>
     public Task<Result<NewPerson>> CreateAsync(
         Actor actor, string userName, string displayName, string? password, bool isAdministrator, CancellationToken cancellationToken) =>
-        ManagedAsync(actor, async users =>
+        ManagedAsync(actor, "create-user", async users =>
         {
+            if (string.IsNullOrWhiteSpace(displayName) || displayName.Trim().Length > LongestName)
+            {
+                return Refusals.Missing<NewPerson>("displayName", $"A name of 1–{LongestName} characters is needed.");
+            }
+
             var account = new Account
             {
                 Id = Guid.CreateVersion7(), UserName = userName.Trim(), DisplayName = displayName.Trim(), IsAdministrator = isAdministrator, MustChangePassword = password is null,
             };
             var secret = password ?? OneTimeCode();
-            return await AuditedAsync(await users.CreateAsync(account, secret), actor, "create-user", account.Id, new NewPerson(account.Id, secret), cancellationToken);
-        });
+            return Checked(await users.CreateAsync(account, secret), new NewPerson(account.Id, secret));
+        }, person => person.Id, cancellationToken);
 
     /// <summary>Gives a person a one-time code that has to be changed at the next sign-in.</summary>
     /// <returns>The code, for the only time.</returns>
     public Task<Result<NewPerson>> ResetPasswordAsync(Actor actor, string userName, CancellationToken cancellationToken) =>
-        ManagedAsync(actor, async users =>
-        {
-            if (await users.FindByNameAsync(userName) is not { } account)
-            {
-                return Refusals.NotFound<NewPerson>("user");
-            }
+        ManagedAsync(actor, "reset-password", async users =>
+            await users.FindByNameAsync(userName) is { } account ? await ChangeAsync(users, account, OneTimeCode(), true) : Refusals.NotFound<NewPerson>("user"), person => person.Id, cancellationToken);
 
-            var code = OneTimeCode();
-            account.MustChangePassword = true;
-            var changed = await users.ResetPasswordAsync(account, await users.GeneratePasswordResetTokenAsync(account), code);
-            await users.SetLockoutEndDateAsync(account, null);
-            return await AuditedAsync(changed, actor, "reset-password", account.Id, new NewPerson(account.Id, code), cancellationToken);
-        });
+    /// <summary>Gives a person a password that need not be changed.</summary>
+    public Task<Result<NewPerson>> SetPasswordAsync(Actor actor, Guid userId, string password, CancellationToken cancellationToken) =>
+        ManagedAsync(actor, "set-password", async users =>
+            await users.FindByIdAsync(userId.ToString()) is { } account ? await ChangeAsync(users, account, password, false) : Refusals.NotFound<NewPerson>("user"), person => person.Id, cancellationToken);
 
     /// <summary>Lets a person sign in no longer, or again. What is open ends within a minute.</summary>
     public Task<Result<bool>> SetDisabledAsync(Actor actor, Guid userId, bool disabled, CancellationToken cancellationToken) =>
-        ManagedAsync(actor, async users =>
+        ManagedAsync(actor, disabled ? "disable-user" : "enable-user", async users =>
         {
             if (await users.FindByIdAsync(userId.ToString()) is not { } account)
             {
@@ -71,8 +72,8 @@ public sealed class UserDesk
             }
 
             account.Disabled = disabled;
-            return await AuditedAsync(await users.UpdateSecurityStampAsync(account), actor, disabled ? "disable-user" : "enable-user", userId, true, cancellationToken);
-        });
+            return Checked(await users.UpdateSecurityStampAsync(account), true);
+        }, _ => userId, cancellationToken);
 
     /// <summary>Makes a person something in a unit; null takes the membership away.</summary>
     public Task<Result<bool>> SetMembershipAsync(Actor actor, Guid userId, string unitCode, UnitRole? role, CancellationToken cancellationToken) =>
@@ -125,29 +126,37 @@ public sealed class UserDesk
         },
         cancellationToken);
 
-    private Task<Result<T>> ManagedAsync<T>(Actor actor, Func<UserManager<Account>, Task<Result<T>>> work) =>
+    /// <summary>Works with Identity as an administrator; what it did and its audit row are one transaction.</summary>
+    private Task<Result<T>> ManagedAsync<T>(
+        Actor actor, string what, Func<UserManager<Account>, Task<Result<T>>> work, Func<T, Guid> subject, CancellationToken cancellationToken) =>
         !actor.IsAdministrator ? Task.FromResult(Refusals.Denied<T>()) : UnitScope.GuardedAsync(async () =>
         {
             await using var services = scopes.CreateAsyncScope();
-            return await work(services.ServiceProvider.GetRequiredService<UserManager<Account>>());
+            var db = services.ServiceProvider.GetRequiredService<UnitVentDbContext>();
+            await using var transaction = await db.Database.BeginTransactionAsync(cancellationToken);
+            await UnitScope.NameUnitAsync(db, AuditTrail.Everywhere, cancellationToken);
+            var result = await work(services.ServiceProvider.GetRequiredService<UserManager<Account>>());
+            if (result.Succeeded)
+            {
+                AuditTrail.Add(db, AuditTrail.Everywhere, clock.GetCurrentInstant(), actor, what, subject(result.Value), "");
+                await db.SaveChangesAsync(cancellationToken);
+                await UnitScope.CommitAsync(transaction);
+            }
+
+            return result;
         });
 
-    private async Task<Result<T>> AuditedAsync<T>(IdentityResult done, Actor actor, string what, Guid subject, T value, CancellationToken cancellationToken)
+    private static async Task<Result<NewPerson>> ChangeAsync(UserManager<Account> users, Account account, string password, bool oneTime)
     {
-        if (!done.Succeeded)
-        {
-            return Result<T>.Refused(Refusal.Value, [.. done.Errors.Select(e => new FieldError(FieldOf(e.Code), "account." + e.Code, e.Description))]);
-        }
-
-        return await scope.OutsideAsync(
-            async db =>
-            {
-                AuditTrail.Add(db, AuditTrail.Everywhere, clock.GetCurrentInstant(), actor, what, subject, "");
-                await db.SaveChangesAsync(cancellationToken);
-                return Result<T>.Of(value);
-            },
-            cancellationToken);
+        account.MustChangePassword = oneTime;
+        account.LockoutEnd = null;
+        var changed = await users.ResetPasswordAsync(account, await users.GeneratePasswordResetTokenAsync(account), password);
+        return Checked(changed, new NewPerson(account.Id, password));
     }
+
+    internal static Result<T> Checked<T>(IdentityResult done, T value) => done.Succeeded
+        ? Result<T>.Of(value)
+        : Result<T>.Refused(Refusal.Value, [.. done.Errors.Select(e => new FieldError(FieldOf(e.Code), "account." + e.Code, e.Description))]);
 
     private static string FieldOf(string identityCode) => identityCode.Contains("Password", StringComparison.Ordinal) ? "password" : "userName";
 

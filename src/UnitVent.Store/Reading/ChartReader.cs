@@ -2,6 +2,7 @@ using System.Globalization;
 using Microsoft.EntityFrameworkCore;
 using NodaTime;
 using UnitVent.Charting.Bands;
+using UnitVent.Charting.Checking;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Episodes;
 using UnitVent.Charting.Flags;
@@ -47,6 +48,11 @@ public sealed class ChartReader
             async (db, place) =>
             {
                 var now = clock.GetCurrentInstant();
+                if (at > now + TimeCheck.Ahead)
+                {
+                    return Result<PatientChart>.Refused(Refusal.Value, "at", "time.future", "The instant lies in the future.");
+                }
+
                 var window = await WindowLoader.OfEpisodeAsync(db, place, at ?? now, cancellationToken);
                 if (window is null)
                 {

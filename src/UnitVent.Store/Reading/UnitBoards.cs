@@ -44,14 +44,14 @@ public sealed class UnitBoards
         try
         {
             // A board is only as fresh as the feed that would have said otherwise.
-            if (feed.Connected && place.Board is { } board && !(board.NextChangeAt <= clock.GetCurrentInstant()))
+            var version = place.Version;
+            if (feed.Connected && place.Built is { } last && last.Version == version && !(last.Board.NextChangeAt <= clock.GetCurrentInstant()))
             {
-                return Result<UnitBoard>.Of(board);
+                return Result<UnitBoard>.Of(last.Board);
             }
 
-            var version = place.Version;
             var built = await scope.WithinAsync(unitId, (db, where) => BuildAsync(db, where.UnitId, clock.GetCurrentInstant(), cancellationToken), cancellationToken);
-            place.Board = built.Succeeded && place.Version == version ? built.Value : null;
+            place.Built = built.Succeeded ? new(version, built.Value) : null;
             return built;
         }
         finally
@@ -64,8 +64,9 @@ public sealed class UnitBoards
     {
         var profile = await WindowLoader.ProfileAsync(db, unitId, cancellationToken);
         var windows = await WindowLoader.OfUnitAsync(db, profile, now, cancellationToken);
+        var episodes = windows.Select(w => w.Episode.Id).ToArray();
         var flags = await db.Flags.AsNoTracking().TagWith("UnitBoards.Flags")
-            .Where(f => f.UnitId == unitId && f.State == FlagState.Open)
+            .Where(f => f.UnitId == unitId && episodes.Contains(f.EpisodeId) && f.State == FlagState.Open)
             .ToListAsync(cancellationToken);
         var byEpisode = flags.ToLookup(f => f.EpisodeId, f => f.ToFlag());
         return Result<UnitBoard>.Of(UnitBoard.Of(profile, now, windows.Select(w =>
@@ -87,20 +88,19 @@ public sealed class UnitBoards
         }
     }
 
+    private sealed record Built(int Version, UnitBoard Board);
+
+    /// <summary>The last board and the version it was built for; every notice makes a new version.</summary>
     private sealed class Kept
     {
         private int version;
 
         public SemaphoreSlim Gate { get; } = new(1, 1);
 
-        public UnitBoard? Board { get; set; }
+        public Built? Built { get; set; }
 
         public int Version => Volatile.Read(ref version);
 
-        public void Forget()
-        {
-            Interlocked.Increment(ref version);
-            Board = null;
-        }
+        public void Forget() => Interlocked.Increment(ref version);
     }
 }

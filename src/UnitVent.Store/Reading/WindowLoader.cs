@@ -47,6 +47,10 @@ internal static class WindowLoader
         return episodes.Count == 0 ? null : (await WindowsAsync(db, profile, episodes, now, since, cancellationToken))[0];
     }
 
+    /// <summary>The window of an episode whose head is locked, so that it must be there.</summary>
+    public static async Task<ChartWindow> OfLockedAsync(UnitVentDbContext db, Place place, Instant now, CancellationToken cancellationToken) =>
+        await OfEpisodeAsync(db, place, now, cancellationToken) ?? throw new InvalidOperationException("A locked episode has a window.");
+
     /// <summary>The windows of every episode that lasts.</summary>
     public static async Task<IReadOnlyList<ChartWindow>> OfUnitAsync(UnitVentDbContext db, UnitProfile profile, Instant now, CancellationToken cancellationToken)
     {
@@ -85,7 +89,7 @@ internal static class WindowLoader
                 r.Episode,
                 r.Facts,
                 Bed = db.BedStays.Where(s => s.UnitId == unitId && s.EpisodeId == r.Episode.Id)
-                    .OrderByDescending(s => s.From)
+                    .OrderByDescending(s => s.Until == null).ThenByDescending(s => s.From).ThenByDescending(s => s.Until)
                     .Join(db.Beds, s => new { s.UnitId, Id = s.BedId }, b => new { b.UnitId, b.Id }, (s, b) => b.Name)
                     .First(),
             })
@@ -103,27 +107,29 @@ internal static class WindowLoader
         UnitVentDbContext db, UnitProfile profile, List<EpisodeFacts> episodes, Instant now, Instant? since, CancellationToken cancellationToken)
     {
         var ids = episodes.Select(e => e.Id).ToArray();
-        var entries = await EntriesAsync(db, profile.Id, ids, since ?? now - Span, now, cancellationToken);
-        var steps = await StepsAsync(db, profile.Id, entries.Where(e => e.Kind == EntryKind.FollowUp).Select(e => e.Id).ToArray(), cancellationToken);
-        var byEpisode = entries.ToLookup(e => e.EpisodeId);
-        return [.. episodes.Select(e => new ChartWindow(e, profile, byEpisode[e.Id].Select(r => r.ToEntry()), steps))];
+        var rows = await EntriesAsync(db, profile.Id, ids, since ?? now - Span, now, cancellationToken);
+        var steps = await StepsAsync(db, profile.Id, rows.Where(e => e.Kind == EntryKind.FollowUp).Select(e => e.Id).ToArray(), now, cancellationToken);
+        var entries = rows.Select(r => Reassigned(r.ToEntry(), steps[r.Id])).ToLookup(e => e.EpisodeId);
+        var closed = steps.SelectMany(s => s).Where(s => s.Step != FollowUpStep.Reassigned).ToDictionary(s => s.FollowUpId, s => s.Step);
+        return [.. episodes.Select(e => new ChartWindow(e, profile, entries[e.Id], closed))];
     }
+
+    private static ChartEntry Reassigned(ChartEntry entry, IEnumerable<FollowUpStepRow> steps) =>
+        entry.Body is FollowUp followUp && steps.LastOrDefault(s => s.Step == FollowUpStep.Reassigned) is { } last
+            ? entry with { Body = followUp with { ForRole = last.ForRole } }
+            : entry;
 
     internal static Task<List<EntryRow>> EntriesAsync(
         UnitVentDbContext db, Guid unitId, Guid[] episodes, Instant after, Instant until, CancellationToken cancellationToken) =>
         db.Entries.FromSqlRaw(EntriesSql, unitId, episodes, after, until).AsNoTracking().TagWith("WindowLoader.Entries").ToListAsync(cancellationToken);
 
-    private static async Task<Dictionary<Guid, FollowUpStep>> StepsAsync(UnitVentDbContext db, Guid unitId, Guid[] followUps, CancellationToken cancellationToken)
+    private static async Task<ILookup<Guid, FollowUpStepRow>> StepsAsync(
+        UnitVentDbContext db, Guid unitId, Guid[] followUps, Instant until, CancellationToken cancellationToken)
     {
-        if (followUps.Length == 0)
-        {
-            return [];
-        }
-
-        var steps = await db.FollowUpSteps.AsNoTracking()
-            .Where(s => s.UnitId == unitId && followUps.Contains(s.FollowUpId) && s.Step != FollowUpStep.Reassigned)
-            .Select(s => new { s.FollowUpId, s.Step })
+        List<FollowUpStepRow> steps = followUps.Length == 0 ? [] : await db.FollowUpSteps.AsNoTracking()
+            .Where(s => s.UnitId == unitId && followUps.Contains(s.FollowUpId) && s.At <= until)
+            .OrderBy(s => s.At)
             .ToListAsync(cancellationToken);
-        return steps.DistinctBy(s => s.FollowUpId).ToDictionary(s => s.FollowUpId, s => s.Step);
+        return steps.ToLookup(s => s.FollowUpId);
     }
 }

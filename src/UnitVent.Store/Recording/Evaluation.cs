@@ -2,7 +2,9 @@ using Microsoft.EntityFrameworkCore;
 using NodaTime;
 using UnitVent.Charting.Flags;
 using UnitVent.Charting.Pictures;
+using UnitVent.Store.Live;
 using UnitVent.Store.Model;
+using UnitVent.Store.Reading;
 using UnitVent.Store.Schema;
 
 namespace UnitVent.Store.Recording;
@@ -11,7 +13,7 @@ namespace UnitVent.Store.Recording;
 internal static class Evaluation
 {
     /// <summary>The name under which the program itself appears.</summary>
-    public const string Program = "UnitVent";
+    private const string Program = "UnitVent";
 
     /// <summary>Locks the head of an episode: one writer of a chart at a time.</summary>
     public static Task<EpisodeRow> LockAsync(UnitVentDbContext db, Place place, CancellationToken cancellationToken) =>
@@ -19,7 +21,7 @@ internal static class Evaluation
 
     /// <summary>Writes what the picture does to the flags, and when to look again; the caller saves and commits.</summary>
     public static async Task<IReadOnlyList<FlagStep>> CarryOnAsync(
-        UnitVentDbContext db, EpisodeRow episode, PatientPicture picture, string by, CancellationToken cancellationToken)
+        UnitVentDbContext db, EpisodeRow episode, PatientPicture picture, CancellationToken cancellationToken)
     {
         var rows = await db.Flags.Where(f => f.UnitId == episode.UnitId && f.EpisodeId == episode.Id && f.State == FlagState.Open).ToListAsync(cancellationToken);
         var open = rows.ConvertAll(r => r.ToFlag());
@@ -37,11 +39,20 @@ internal static class Evaluation
             }
 
             row.Take(flag);
-            db.FlagEvents.Add(EventOf(row, step.Kind, picture.AsOf, by));
+            db.FlagEvents.Add(EventOf(row, step.Kind, picture.AsOf, Program));
         }
 
         episode.NextEvaluationAt = Soonest(picture.NextChangeAt, rows.Where(r => r.State == FlagState.Open).Select(r => r.ToFlag().InHand?.Until));
         return steps;
+    }
+
+    /// <summary>Reads the chart once more, carries the flags on, saves and tells; the caller commits.</summary>
+    public static async Task AgainAsync(UnitVentDbContext db, Place place, EpisodeRow episode, Instant now, CancellationToken cancellationToken)
+    {
+        var window = await WindowLoader.OfLockedAsync(db, place, now, cancellationToken);
+        await CarryOnAsync(db, episode, PatientPicture.At(window, now), cancellationToken);
+        await db.SaveChangesAsync(cancellationToken);
+        await Notices.SendAsync(db, place.UnitId, cancellationToken);
     }
 
     /// <summary>The event that keeps a flag's numbers of this moment.</summary>
