@@ -17,6 +17,8 @@ namespace UnitVent.Web.Bedside;
 /// <summary>Everything about one patient: what is now, what is in force, how it went, every entry, every flag.</summary>
 public sealed partial class BedsidePage
 {
+    private const int EntriesAPage = 25;
+
     private readonly CancellationTokenSource left = new();
     private PatientChart? chart;
     private PatientRow? row;
@@ -92,7 +94,7 @@ public sealed partial class BedsidePage
 
     private async Task LoadPanelsAsync()
     {
-        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(), left.Token);
+        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(Limit: EntriesAPage), left.Token);
         (entries, older) = page.Succeeded ? ([.. page.Value.Items], page.Value.Next) : (entries, older);
         var all = await Charts.FlagsAsync(actor, Id, true, left.Token);
         flags = all.Succeeded ? all.Value : flags;
@@ -108,7 +110,7 @@ public sealed partial class BedsidePage
 
     private async Task OlderAsync()
     {
-        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(After: older), left.Token);
+        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(After: older, Limit: EntriesAPage), left.Token);
         if (page.Succeeded)
         {
             entries!.AddRange(page.Value.Items);

@@ -9,7 +9,7 @@ const bundle = () => globalThis.echarts ? Promise.resolve() : loading ??= new Pr
   document.head.append(script);
 });
 
-const laneHeight = 130, laneGap = 34, top = 18;
+const laneHeight = 130, laneGap = 36, top = 30;
 const ink = name => getComputedStyle(document.documentElement).getPropertyValue(`--${name}`).trim();
 const plain = text => text.replace(/[&<>"]/g, c => ({ "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;" })[c]);
 const two = number => String(number).padStart(2, "0");
@@ -30,7 +30,7 @@ function marks(lane, data, index) {
     markLine: {
       symbol: "none", animation: false, label: { show: false }, lineStyle: { color: ink("quiet"), type: "dotted", width: 1 },
       data: [...data.marks.map(m => ({ xAxis: m.at })), ...lane.levels.map(level => ({
-        yAxis: level, lineStyle: { color: ink("edge"), type: "dashed" }, label: { show: true, position: "insideStartTop", formatter: `${level}`, color: ink("quiet") },
+        yAxis: level, lineStyle: { color: ink("edge"), type: "dashed" }, label: { show: false },
       }))],
     },
   };
@@ -51,14 +51,14 @@ function option(data) {
     useUTC: true, animation: false, textStyle: { fontFamily: "inherit", color: ink("ink") }, backgroundColor: "transparent",
     axisPointer: { link: [{ xAxisIndex: "all" }], lineStyle: { color: ink("ink") } },
     tooltip: { trigger: "axis", confine: true, formatter: says(data), backgroundColor: ink("surface"), borderColor: ink("edge"), textStyle: { color: ink("ink") } },
-    title: each((lane, i) => ({ text: lane.title, left: 0, top: i * (laneHeight + laneGap), padding: 0, textStyle: { fontSize: 13, fontWeight: 600, color: ink("ink") } })),
+    title: each((lane, i) => ({ text: lane.title, left: 0, top: 8 + i * (laneHeight + laneGap), padding: 0, textStyle: { fontSize: 13, fontWeight: 600, color: ink("ink") } })),
     grid: each((_, i) => ({ left: 40, right: 12, top: top + i * (laneHeight + laneGap), height: laneHeight })),
     xAxis: each((_, i) => ({
       type: "time", gridIndex: i, min: data.from, max: data.to, axisLine: { lineStyle: { color: ink("edge") } }, splitLine: { show: false },
       axisLabel: { show: i === data.lanes.length - 1, color: ink("quiet"), hideOverlap: true, formatter: ms => clock(ms) === "00:00" ? dayName(ms) : clock(ms) },
     })),
     yAxis: each((lane, i) => ({
-      type: "value", gridIndex: i, min: lane.low, max: lane.high, splitNumber: 3,
+      type: "value", gridIndex: i, min: lane.low, max: lane.high, splitNumber: 3, interval: lane.high === 100 ? 25 : undefined,
       axisLabel: { color: ink("quiet") }, splitLine: { lineStyle: { color: ink("line") } },
     })),
     dataZoom: [{ type: "inside", xAxisIndex: data.lanes.map((_, i) => i), filterMode: "none", zoomOnMouseWheel: "ctrl", moveOnMouseMove: true }],

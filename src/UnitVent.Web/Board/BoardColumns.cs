@@ -1,3 +1,4 @@
+using System.Globalization;
 using NodaTime;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Pictures;
@@ -18,9 +19,9 @@ public sealed class BoardColumns(PatientPicture picture, Instant now)
 
     public string Mode => picture.Settings is { } s ? SettingWords.Brief(s.Body) : "no settings charted";
 
-    public string? ModeSince => picture.Settings is { } s ? $"{Time(s.At)}, for {Format.Length(now - s.At)}" : null;
+    public string? ModeSince => picture.Settings is { } s ? "for " + Format.Length(now - s.At) : null;
 
-    public BoardCell FiO2 => picture.Settings?.Body.FiO2 is { } set ? new(Format.Typed(set)) : new("–", "Needs settings.");
+    public BoardCell FiO2 => picture.Settings?.Body.FiO2 is { } set ? new(set.ToString("0.##", CultureInfo.InvariantCulture)) : new("–", "Needs settings.");
 
     /// <summary>The computed mean pressure; the measured one beside it only when they disagree, or alone when none can be computed.</summary>
     public BoardCell Mean
@@ -95,8 +96,8 @@ public sealed class BoardColumns(PatientPicture picture, Instant now)
 
             var before = picture.Window.Latest<SettingChange>(EntryKind.SettingChange, last.At - Duration.Epsilon);
             var what = before is { } b ? TimelineMarks.Changed(b.Body, last.Body) : "first settings";
-            var gas = picture.LatestGas is { } g && g.Gas.At > last.At ? $"gas since, {Time(g.Gas.At)}" : "no gas since";
-            return ($"{Time(last.At)} {what}", gas);
+            var gas = picture.LatestGas is { } g && g.Gas.At > last.At ? "gas since " + Time(g.Gas.At) : "no gas since";
+            return (what, $"{gas} · {Time(last.At)}");
         }
     }
 

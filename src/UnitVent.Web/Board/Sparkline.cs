@@ -13,9 +13,9 @@ public static class Sparkline
     private const int FewestGases = 3;
     private const int MostGases = 8;
     private const double Width = 76;
-    private const double Height = 24;
+    private const double Height = 26;
     private const double LowMmHg = 50;
-    private const double HighMmHg = 400;
+    private const double HighMmHg = 300;
 
     private static readonly Duration Gap = Duration.FromHours(12);
 

@@ -14,8 +14,8 @@ public static class FormLayout
 
     private static readonly FormGroup[] Gas =
     [
-        new("Sample", ["drawnAt", "specimen", "site", "fiO2", "temperatureC", "temperatureCorrected", "tensionUnit"]),
-        new("Gas", ["pH", "pCO2", "pO2"]),
+        new("Sample", ["drawnAt", "specimen", "site", "fiO2", "temperatureC", "temperatureCorrected"]),
+        new("Gas", ["pH", "pCO2", "pO2", "tensionUnit"]),
         new("Oximetry and metabolic", ["sO2Percent", "haemoglobinGDl", "carboxyHbPercent", "metHbPercent", "lactateMmolL", "bicarbonateMmolL", "bicarbonateKind", "baseExcessMmolL"]),
         new("From the monitor", ["spO2Percent", "etCO2MmHg"]),
         new("Around the draw", ["relativeToChange", "sampleNumber"]),
