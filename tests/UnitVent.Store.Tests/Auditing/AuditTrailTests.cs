@@ -19,6 +19,7 @@ public sealed class AuditTrailTests(TestStore store) : IClassFixture<TestStore>
         { "delete from audit_event where number = 4", 5, "a removed row" },
         { "delete from audit_event where number = 8", 8, "a removed tail" },
         { "update audit_event set number = 100 where number = 6", 7, "a row put elsewhere" },
+        { "update audit_event set who = 'Nobody', hash = sha256(previous_hash || convert_to(audit_text(unit_id, number, at, 'Nobody', what, subject, detail), 'UTF8')) where number = 8", 8, "a last row hashed anew" },
     };
 
     [Theory, MemberData(nameof(Tampering))]

@@ -91,6 +91,33 @@ public sealed class LiveTests(TestStore store) : IClassFixture<TestStore>, IAsyn
         }
     }
 
+    [Fact]
+    public async Task ChartThatCannotBeRead_DoesNotKeepTheOthersFromTheirEvaluation()
+    {
+        var (broken, sound) = (await store.AdmitAsync("5"), await store.AdmitAsync("6"));
+        await store.RecordAsync(sound, TestStore.New(store.Aprv()), TestStore.New(store.Check()));
+        await Sql.TellAsync(
+            store.Runtime,
+            $$"""
+            insert into entry (unit_id, id, episode_id, kind, effective_at, recorded_at, recorded_by, confirmed, body)
+            values ('{{store.UnitId}}', gen_random_uuid(), '{{broken}}', 'Note', '2026-03-10T11:00Z', now(), 'T', array[]::text[], '{"unknown": 1}');
+            update episode set next_evaluation_at = '2026-03-10T00:00Z' where id = '{{broken}}'
+            """,
+            store.UnitId);
+        var start = store.Now;
+        store.Clock.Now = start + Duration.FromHours(6);
+        try
+        {
+            await store.Get<DueEvaluator>().EvaluateDueAsync(TestStore.Cancel);
+            Assert.Contains(TestStore.Value(await store.Get<ChartReader>().FlagsAsync(store.Charge, sound, false, TestStore.Cancel)), f => f.Finding.Rule == "R32");
+        }
+        finally
+        {
+            store.Clock.Now = start;
+            await Sql.TellAsync(store.Runtime, $"update episode set ended_at = now() where id = '{broken}'", store.UnitId);
+        }
+    }
+
     private static async Task UntilAsync(Func<bool> condition)
     {
         for (var i = 0; i < 200 && !condition(); i++)

@@ -21,6 +21,24 @@ public sealed class ProtectionTests(TestStore store) : IClassFixture<TestStore>
         }
     }
 
+    [Theory]
+    [InlineData("unit")]
+    [InlineData("bed")]
+    [InlineData("patient")]
+    [InlineData("episode")]
+    [InlineData("bed_stay")]
+    [InlineData("flag")]
+    [InlineData("unit_lookup")]
+    [InlineData("api_token")]
+    [InlineData("set_up")]
+    [InlineData("audit_head")]
+    public async Task RuntimeRole_RemovesNothing(string table)
+    {
+        var refusal = await Assert.ThrowsAsync<PostgresException>(() => Sql.TellAsync(store.Runtime, $"delete from {table}", store.UnitId));
+
+        Assert.Equal(PostgresErrorCodes.InsufficientPrivilege, refusal.SqlState);
+    }
+
     [Theory, MemberData(nameof(AppendOnly))]
     public async Task Owner_IsRefusedByTheTriggers(string table)
     {
