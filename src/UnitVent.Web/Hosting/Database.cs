@@ -16,6 +16,9 @@ public sealed class Database : IAsyncDisposable
 
     public string RuntimeConnection { get; }
 
+    /// <summary>As the run-time role, without waiting for the disk: for what can be told again, such as the demo unit.</summary>
+    public string HastyConnection => new DbConnectionStringBuilder { ConnectionString = RuntimeConnection, ["Options"] = "-c synchronous_commit=off" }.ConnectionString;
+
     /// <summary>Ends when the private cluster does; never for a given server.</summary>
     public Task Ended => cluster?.Ended ?? Task.Delay(Timeout.Infinite);
 

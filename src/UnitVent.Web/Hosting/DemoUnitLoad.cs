@@ -13,6 +13,7 @@ namespace UnitVent.Web.Hosting;
 /// <remarks>The unit's own time of making is the origin of its story: a later start goes on from where the last one stopped.</remarks>
 public sealed class DemoUnitLoad
 {
+    private const int AtOnce = 4;
     private static readonly Duration Before = Duration.FromDays(4);
 
     private readonly IServiceProvider desks;
@@ -29,7 +30,7 @@ public sealed class DemoUnitLoad
     public static async Task<string> RunAsync(Database database, CancellationToken cancel)
     {
         var clock = new SteppingClock();
-        await using var desks = StoreSession.Services(database, clock);
+        await using var desks = StoreSession.Services(database.HastyConnection, clock);
         var load = new DemoUnitLoad(desks, clock, cancel);
         await load.TopUpAsync();
         clock.Set(load.now);
@@ -44,10 +45,10 @@ public sealed class DemoUnitLoad
         var story = DemoUnit.Create(Path.Combine(AppContext.BaseDirectory, "demo-seed"), known?.CreatedAt ?? now - Before, now);
         var unitId = known?.Profile.Id ?? await Done(units.CreateAsync(UserDesk.CommandLine, Unit(story), cancel));
         var standing = known?.TakenBeds ?? [];
-        foreach (var episode in story.Episodes)
-        {
-            await TellAsync(episode, unitId, standing.Contains(episode.Admission.Bed));
-        }
+        await Parallel.ForEachAsync(
+            story.Episodes,
+            new ParallelOptions { MaxDegreeOfParallelism = AtOnce, CancellationToken = cancel },
+            async (episode, _) => await TellAsync(episode, unitId, standing.Contains(episode.Admission.Bed)));
     }
 
     private async Task TellAsync(SimulatedEpisode episode, Guid unitId, bool stands)

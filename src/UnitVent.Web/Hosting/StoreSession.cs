@@ -18,7 +18,7 @@ public sealed class StoreSession : IAsyncDisposable
         try
         {
             await database.MigrateAsync(cancel);
-            return new StoreSession(database, Services(database, MachineClock.Clock));
+            return new StoreSession(database, Services(database.RuntimeConnection, MachineClock.Clock));
         }
         catch
         {
@@ -28,12 +28,12 @@ public sealed class StoreSession : IAsyncDisposable
     }
 
     /// <summary>The store's desks with a clock of their own and no background services.</summary>
-    public static ServiceProvider Services(Database database, IClock clock)
+    public static ServiceProvider Services(string connection, IClock clock)
     {
         var services = new ServiceCollection();
         services.AddLogging();
         services.AddSingleton(clock);
-        services.AddUnitVentStore(database.RuntimeConnection);
+        services.AddUnitVentStore(connection);
         return services.BuildServiceProvider();
     }
 
