@@ -69,8 +69,12 @@ public sealed class EntryForm
         Questions.AddRange(errors.Where(e => e.IsAsk && !answered.Contains(e.Code)).Select(e => new Question(e)));
     }
 
-    /// <summary>A value that a person changed after a question was answered is asked about again.</summary>
-    public void Retyped(FormField field) => Questions.RemoveAll(q => q.Asked.Field == field.Field.Name);
+    /// <summary>What was said about a value that a person typed anew holds no longer: neither the error nor the answer to a question.</summary>
+    public void Retyped(FormField field)
+    {
+        field.Errors.Clear();
+        Questions.RemoveAll(q => q.Asked.Field == field.Field.Name);
+    }
 
     private NewEntry Entry(Entry body) => new(Id, body)
     {

@@ -29,10 +29,13 @@ internal sealed class ServedProgram : IAsyncDisposable
     }
 
     /// <summary>Starts serving and waits until it is ready.</summary>
-    public static async Task<ServedProgram> StartAsync(string dataFolder, params string[] arguments)
+    public static Task<ServedProgram> StartAsync(string dataFolder, params string[] arguments) => StartAsync(dataFolder, null, arguments);
+
+    /// <summary>Starts serving from a database server that was given, and waits until it is ready.</summary>
+    public static async Task<ServedProgram> StartAsync(string dataFolder, Connections? connections, params string[] arguments)
     {
         var address = new Uri($"http://127.0.0.1:{FreePort()}");
-        var program = new ServedProgram(Start(dataFolder, address, ["serve", .. arguments]), address);
+        var program = new ServedProgram(Start(dataFolder, address, ["serve", .. arguments], connections), address);
         program.Listen();
         await program.UntilReadyAsync();
         return program;
@@ -74,12 +77,12 @@ internal sealed class ServedProgram : IAsyncDisposable
         process.Dispose();
     }
 
-    private static Process Start(string dataFolder, Uri? address, string[] arguments)
+    private static Process Start(string dataFolder, Uri? address, string[] arguments, Connections? connections = null)
     {
         var start = new ProcessStartInfo("dotnet", [ProgramFile(), .. arguments]) { RedirectStandardOutput = true, RedirectStandardError = true };
         start.Environment["UNITVENT_DATA"] = dataFolder;
-        start.Environment.Remove("ConnectionStrings__Owner");
-        start.Environment.Remove("ConnectionStrings__Runtime");
+        start.Environment["ConnectionStrings__Owner"] = connections?.Owner;
+        start.Environment["ConnectionStrings__Runtime"] = connections?.Runtime;
         start.Environment["UNITVENT_URL"] = address?.ToString();
         return Process.Start(start)!;
     }
@@ -98,6 +101,9 @@ internal sealed class ServedProgram : IAsyncDisposable
         listener.Start();
         return ((IPEndPoint)listener.LocalEndpoint).Port;
     }
+
+    /// <summary>The ways into a database server that was given.</summary>
+    internal sealed record Connections(string Owner, string Runtime);
 
     private void Listen()
     {
