@@ -77,7 +77,7 @@ internal static class WindowLoader
         Beds = beds,
     };
 
-    private static async Task<List<EpisodeFacts>> EpisodesAsync(
+    internal static async Task<List<EpisodeFacts>> EpisodesAsync(
         UnitVentDbContext db, Guid unitId, System.Linq.Expressions.Expression<Func<EpisodeRow, bool>> which, CancellationToken cancellationToken)
     {
         var rows = await db.Episodes.AsNoTracking().TagWith("WindowLoader.Episodes")

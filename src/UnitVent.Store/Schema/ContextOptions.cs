@@ -6,9 +6,13 @@ namespace UnitVent.Store.Schema;
 /// <summary>How a context reaches its database.</summary>
 internal static class ContextOptions
 {
+    private const int StatementsKeptPrepared = 100;
+
     public static NpgsqlDataSource DataSource(string connectionString)
     {
         var builder = new NpgsqlDataSourceBuilder(connectionString);
+        builder.ConnectionStringBuilder.MaxAutoPrepare = StatementsKeptPrepared;
+        builder.ConnectionStringBuilder.AutoPrepareMinUsages = 2;
         builder.UseNodaTime();
         return builder.Build();
     }

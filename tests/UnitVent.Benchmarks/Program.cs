@@ -1,0 +1,4 @@
+using BenchmarkDotNet.Running;
+using UnitVent.Benchmarks;
+
+BenchmarkSwitcher.FromAssembly(typeof(DemoBoard).Assembly).Run(args);
