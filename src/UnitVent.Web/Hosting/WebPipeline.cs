@@ -13,11 +13,8 @@ public static class WebPipeline
         app.UseSecurityHeaders();
         app.UseHsts();
         app.UseWhen(IsApi, api => api.UseApiProblems());
-        app.UseWhen(http => !IsApi(http), pages =>
-        {
-            pages.UseExceptionHandler("/failed");
-            pages.UseStatusCodePagesWithReExecute("/not-found");
-        });
+        app.UseWhen(http => !IsApi(http), pages => pages.UseExceptionHandler("/failed"));
+        app.UseWhen(http => !IsApi(http) && HttpMethods.IsGet(http.Request.Method), pages => pages.UseStatusCodePagesWithReExecute("/not-found"));
         app.UseRouting();
         app.UseSameOriginCircuits();
         app.UseCookiePolicy();
