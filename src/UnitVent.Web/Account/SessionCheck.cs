@@ -1,4 +1,3 @@
-using System.Data.Common;
 using System.Security.Claims;
 using Microsoft.AspNetCore.Identity;
 using Microsoft.Extensions.Options;
@@ -27,7 +26,7 @@ public sealed class SessionCheck(EndedSessions ended, IServiceScopeFactory scope
             var account = await scope.ServiceProvider.GetRequiredService<UserManager<UserAccount>>().FindByIdAsync(userId.ToString());
             return account is { Disabled: false } && account.SecurityStamp == person.FindFirstValue(options.Value.ClaimsIdentity.SecurityStampClaimType);
         }
-        catch (Exception e) when (e is DbException || e.InnerException is DbException)
+        catch (Exception e) when (StoreTrouble.Is(e))
         {
             // The store is away: whoever is in stays in; nothing can be read or written meanwhile.
             return true;

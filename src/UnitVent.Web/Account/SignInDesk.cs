@@ -14,27 +14,17 @@ public sealed class SignInDesk(SignInManager<UserAccount> signIn, AuditTrail aud
 
     private UserManager<UserAccount> Users => signIn.UserManager;
 
-    /// <summary>Signs in; false when name and password do not fit, or the account is disabled or held for a minute. The caller is not told which.</summary>
-    public async Task<bool> SignInAsync(HttpContext http, string userName, string password)
+    /// <summary>Signs in. Whether the name is unknown, the password wrong, or the account disabled or held for a minute, the caller is not told.</summary>
+    public async Task<SignInAnswer> SignInAsync(HttpContext http, string userName, string password)
     {
-        var account = await Users.FindByNameAsync(userName);
-        if (account is null)
+        try
         {
-            Users.PasswordHasher.HashPassword(Stranger, password); // takes as long as a known name would
-            await KeepAsync("unknown", "sign-in-failed", null, http);
-            return false;
+            return await TryAsync(http, userName, password) ? SignInAnswer.SignedIn : SignInAnswer.DoesNotFit;
         }
-
-        var checkedPassword = await signIn.CheckPasswordSignInAsync(account, password, lockoutOnFailure: true);
-        if (!checkedPassword.Succeeded || account.Disabled)
+        catch (Exception e) when (StoreTrouble.Is(e))
         {
-            await KeepAsync(account.DisplayName, "sign-in-failed", account.Id, http);
-            return false;
+            return SignInAnswer.StoreIsAway;
         }
-
-        await BeginAsync(http, account);
-        await KeepAsync(account.DisplayName, "sign-in", account.Id, http);
-        return true;
     }
 
     public async Task SignOutAsync(HttpContext http)
@@ -68,6 +58,28 @@ public sealed class SignInDesk(SignInManager<UserAccount> signIn, AuditTrail aud
         await KeepAsync(account.DisplayName, "change-password", account.Id, http);
         await BeginAsync(http, account);
         return [];
+    }
+
+    private async Task<bool> TryAsync(HttpContext http, string userName, string password)
+    {
+        var account = await Users.FindByNameAsync(userName);
+        if (account is null)
+        {
+            Users.PasswordHasher.HashPassword(Stranger, password); // takes as long as a known name would
+            await KeepAsync("unknown", "sign-in-failed", null, http);
+            return false;
+        }
+
+        var checkedPassword = await signIn.CheckPasswordSignInAsync(account, password, lockoutOnFailure: true);
+        if (!checkedPassword.Succeeded || account.Disabled)
+        {
+            await KeepAsync(account.DisplayName, "sign-in-failed", account.Id, http);
+            return false;
+        }
+
+        await BeginAsync(http, account);
+        await KeepAsync(account.DisplayName, "sign-in", account.Id, http);
+        return true;
     }
 
     private async Task BeginAsync(HttpContext http, UserAccount account)

@@ -1,3 +1,4 @@
+using Microsoft.AspNetCore.Diagnostics;
 using UnitVent.Web.Account;
 using UnitVent.Web.Api;
 using UnitVent.Web.Handover;
@@ -13,7 +14,7 @@ public static class WebPipeline
         app.UseSecurityHeaders();
         app.UseHsts();
         app.UseWhen(IsApi, api => api.UseApiProblems());
-        app.UseWhen(http => !IsApi(http), pages => pages.UseExceptionHandler("/failed"));
+        app.UseWhen(http => !IsApi(http), pages => pages.UseExceptionHandler("/failed").Use(ShowFailureAsPage));
         app.UseWhen(http => !IsApi(http) && HttpMethods.IsGet(http.Request.Method), pages => pages.UseStatusCodePagesWithReExecute("/not-found"));
         app.UseRouting();
         app.UseSameOriginCircuits();
@@ -37,6 +38,17 @@ public static class WebPipeline
             circuits.DisableWebSocketCompression = true;
             circuits.ContentSecurityFrameAncestorsPolicy = null;
         });
+    }
+
+    /// <summary>The page that says so is read, not sent: a form that failed is not sent to it once more.</summary>
+    private static Task ShowFailureAsPage(HttpContext http, RequestDelegate next)
+    {
+        if (http.Features.Get<IExceptionHandlerFeature>() is not null)
+        {
+            http.Request.Method = HttpMethods.Get;
+        }
+
+        return next(http);
     }
 
     private static bool IsApi(HttpContext http) => http.Request.Path.StartsWithSegments(ApiEndpoints.Root);
