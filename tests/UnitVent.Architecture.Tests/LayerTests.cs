@@ -12,7 +12,7 @@ public sealed class LayerTests
         { "UnitVent.Handover", ["UnitVent.Charting"] },
         { "UnitVent.Simulation", ["UnitVent.Charting", "UnitVent.Physiology"] },
         { "UnitVent.Store", ["UnitVent.Charting"] },
-        { "unitvent", ["UnitVent.Charting", "UnitVent.Handover", "UnitVent.Simulation", "UnitVent.Store"] },
+        { "unitvent", ["UnitVent.Charting", "UnitVent.Handover", "UnitVent.Physiology", "UnitVent.Simulation", "UnitVent.Store"] },
     };
 
     [Theory]
