@@ -29,7 +29,7 @@ public sealed class AccessibilityTests(Ward ward) : IClassFixture<Ward>
         await page.ChartAprvAsync(minutesAgo: 30);
         await Expect(page.Locator("[data-testid=lanes] svg")).ToBeVisibleAsync();
         await CleanAsync(page, "patient");
-        foreach (var task in Drawers)
+        foreach (var task in width == 1280 ? Drawers : Drawers[..4])
         {
             var drawer = await page.OpenAsync(task);
             await CleanAsync(page, task);
@@ -52,7 +52,7 @@ public sealed class AccessibilityTests(Ward ward) : IClassFixture<Ward>
         await using var screen = await ward.PhysicianAsync();
         await screen.Page.AdmitAsync("3", "Feldspat", "E-3");
         var drawer = await screen.Page.OpenAsync("Note");
-        await Expect(drawer.GetByLabel("Time", new() { Exact = true })).ToBeFocusedAsync();
+        await Expect(drawer.Box("Time")).ToBeFocusedAsync();
 
         await screen.Page.Keyboard.PressAsync("Tab");
         await screen.Page.Keyboard.TypeAsync("Seen");

@@ -23,7 +23,7 @@ public sealed class StoreLostTests(Ward ward) : IClassFixture<Ward>
         ward.LoseStore();
         await drawer.GetByRole(AriaRole.Button, new() { Name = "Save" }).ClickAsync();
         await Expect(drawer.GetByTestId("save-state")).ToContainTextAsync("Not saved", new() { Timeout = BackWithinMs });
-        await Expect(drawer.GetByLabel("Note", new() { Exact = true })).ToHaveValueAsync("Turned to the left at the change of shift");
+        await Expect(drawer.Box("Note")).ToHaveValueAsync("Turned to the left at the change of shift");
         await Expect(station.Page.GetByTestId("not-connected")).ToContainTextAsync("What you see is from then", new() { Timeout = BackWithinMs });
         await Expect(station.Page.GetByTestId("bed-1")).ToBeVisibleAsync();
 
