@@ -1,6 +1,6 @@
+using System.Reflection;
 using Microsoft.AspNetCore.Authorization;
 using Microsoft.AspNetCore.Components;
-using System.Reflection;
 
 namespace UnitVent.Architecture.Tests;
 

@@ -1,7 +1,7 @@
 using System.Data;
+using Microsoft.EntityFrameworkCore;
 using NodaTime;
 using Npgsql;
-using Microsoft.EntityFrameworkCore;
 
 namespace UnitVent.Benchmarks;
 

@@ -24,23 +24,50 @@ internal sealed class Chart
 
     public static SettingChange Aprv(double minutesAgo = 600, decimal high = 28, decimal low = 5, decimal tHigh = 4.5m, decimal tLow = 0.5m, decimal fiO2 = 0.5m) => new()
     {
-        ChangedAt = Ago(minutesAgo), Mode = VentilationMode.Aprv, PHighCmH2O = high, PLowCmH2O = low, THighS = tHigh, TLowS = tLow, FiO2 = fiO2,
+        ChangedAt = Ago(minutesAgo),
+        Mode = VentilationMode.Aprv,
+        PHighCmH2O = high,
+        PLowCmH2O = low,
+        THighS = tHigh,
+        TLowS = tLow,
+        FiO2 = fiO2,
     };
 
     public static SettingChange PressureControl(double minutesAgo = 600) => new()
     {
-        ChangedAt = Ago(minutesAgo), Mode = VentilationMode.PressureControl, SetRatePerMin = 20, InspiratoryPressureAbovePeepCmH2O = 20, InspiratoryTimeS = 1.0m, PeepCmH2O = 10, FiO2 = 0.5m,
+        ChangedAt = Ago(minutesAgo),
+        Mode = VentilationMode.PressureControl,
+        SetRatePerMin = 20,
+        InspiratoryPressureAbovePeepCmH2O = 20,
+        InspiratoryTimeS = 1.0m,
+        PeepCmH2O = 10,
+        FiO2 = 0.5m,
     };
 
     public static BloodGas Gas(double minutesAgo = 30, decimal pO2 = 75, decimal? fiO2 = 0.5m, decimal pH = 7.34m, decimal pCO2 = 48, decimal? bicarbonate = 25.5m) => new()
     {
-        DrawnAt = Ago(minutesAgo), Specimen = Specimen.Arterial, TensionUnit = TensionUnit.MmHg, PH = pH, PCO2 = pCO2, PO2 = pO2, FiO2 = fiO2, BicarbonateMmolL = bicarbonate,
+        DrawnAt = Ago(minutesAgo),
+        Specimen = Specimen.Arterial,
+        TensionUnit = TensionUnit.MmHg,
+        PH = pH,
+        PCO2 = pCO2,
+        PO2 = pO2,
+        FiO2 = fiO2,
+        BicarbonateMmolL = bicarbonate,
     };
 
     public static VentilatorCheck Check(double minutesAgo = 25, decimal? peak = 60, decimal? end = 36, decimal? release = 380, decimal? spO2 = 94, decimal? map = 74) => new()
     {
-        ObservedAt = Ago(minutesAgo), SettingsConfirmed = true, TotalMinuteVolumeLMin = 6.6m, ReleaseVolumeMl = release, ReleasesAveraged = 3, FlowReadings = 3,
-        PeakExpiratoryFlowLMin = peak, EndReleaseFlowLMin = end, SpO2Percent = spO2, MeanArterialPressureMmHg = map,
+        ObservedAt = Ago(minutesAgo),
+        SettingsConfirmed = true,
+        TotalMinuteVolumeLMin = 6.6m,
+        ReleaseVolumeMl = release,
+        ReleasesAveraged = 3,
+        FlowReadings = 3,
+        PeakExpiratoryFlowLMin = peak,
+        EndReleaseFlowLMin = end,
+        SpO2Percent = spO2,
+        MeanArterialPressureMmHg = map,
     };
 
     /// <summary>A chart with settings, a gas and a check, as after a careful round.</summary>

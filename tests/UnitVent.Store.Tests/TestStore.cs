@@ -77,17 +77,38 @@ public sealed class TestStore : IAsyncLifetime
 
     internal SettingChange Aprv(double minutesAgo = 60, decimal high = 28) => new()
     {
-        ChangedAt = Ago(minutesAgo), Mode = VentilationMode.Aprv, PHighCmH2O = high, PLowCmH2O = 5, THighS = 4.5m, TLowS = 0.5m, FiO2 = 0.5m,
+        ChangedAt = Ago(minutesAgo),
+        Mode = VentilationMode.Aprv,
+        PHighCmH2O = high,
+        PLowCmH2O = 5,
+        THighS = 4.5m,
+        TLowS = 0.5m,
+        FiO2 = 0.5m,
     };
 
     internal BloodGas Gas(double minutesAgo = 30, decimal pO2 = 75) => new()
     {
-        DrawnAt = Ago(minutesAgo), Specimen = Specimen.Arterial, TensionUnit = TensionUnit.MmHg, PH = 7.340m, PCO2 = 48, PO2 = pO2, FiO2 = 0.5m, BicarbonateMmolL = 25.5m,
+        DrawnAt = Ago(minutesAgo),
+        Specimen = Specimen.Arterial,
+        TensionUnit = TensionUnit.MmHg,
+        PH = 7.340m,
+        PCO2 = 48,
+        PO2 = pO2,
+        FiO2 = 0.5m,
+        BicarbonateMmolL = 25.5m,
     };
 
     internal VentilatorCheck Check(double minutesAgo = 25, decimal end = 60) => new()
     {
-        ObservedAt = Ago(minutesAgo), SettingsConfirmed = true, PeakExpiratoryFlowLMin = 100, EndReleaseFlowLMin = end, FlowReadings = 3, ReleaseVolumeMl = 380, ReleasesAveraged = 3, SpO2Percent = 94, TotalMinuteVolumeLMin = 6.6m,
+        ObservedAt = Ago(minutesAgo),
+        SettingsConfirmed = true,
+        PeakExpiratoryFlowLMin = 100,
+        EndReleaseFlowLMin = end,
+        FlowReadings = 3,
+        ReleaseVolumeMl = 380,
+        ReleasesAveraged = 3,
+        SpO2Percent = 94,
+        TotalMinuteVolumeLMin = 6.6m,
     };
 
     private Instant Ago(double minutes) => Now - Duration.FromMinutes(minutes);

@@ -46,7 +46,12 @@ internal static class Admitting
         var patient = await PatientAsync(db, unitId, actor, admission.Patient, now, cancellationToken);
         var episode = new EpisodeRow
         {
-            UnitId = unitId, Id = admission.Id, PatientId = patient.Id, AdmittedAt = now, AirwaySecuredAt = Instant.Min(admission.AirwaySecuredAt, now), Reason = admission.Reason,
+            UnitId = unitId,
+            Id = admission.Id,
+            PatientId = patient.Id,
+            AdmittedAt = now,
+            AirwaySecuredAt = Instant.Min(admission.AirwaySecuredAt, now),
+            Reason = admission.Reason,
         };
         db.Episodes.Add(episode);
         db.UnitLookups.Add(new UnitLookupRow { Id = episode.Id, UnitId = unitId, EpisodeId = episode.Id });

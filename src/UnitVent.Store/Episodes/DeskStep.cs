@@ -16,7 +16,14 @@ internal sealed record DeskStep(UnitVentDbContext Db, EpisodeRow Episode, Guid I
     {
         Db.EpisodeEvents.Add(new EpisodeEventRow
         {
-            UnitId = Episode.UnitId, Id = Id, EpisodeId = Episode.Id, Kind = Kind, At = at ?? Now, RecordedAt = Now, RecordedBy = Actor.Name, Detail = Asked,
+            UnitId = Episode.UnitId,
+            Id = Id,
+            EpisodeId = Episode.Id,
+            Kind = Kind,
+            At = at ?? Now,
+            RecordedAt = Now,
+            RecordedBy = Actor.Name,
+            Detail = Asked,
         });
         AuditTrail.Add(Db, Episode.UnitId, Now, Actor, Kind, Episode.Id, "");
         return Result<Guid>.Of(Id);

@@ -16,7 +16,13 @@ internal static class PatientHeads
         (head.Mrn, head.Facts) = (facts.Mrn!, JsonSerializer.Serialize(facts, ChartJson.Options));
         db.PatientFacts.Add(new PatientFactRow
         {
-            UnitId = head.UnitId, Id = Guid.CreateVersion7(), PatientId = head.Id, RecordedAt = at, RecordedBy = actor.Name, Reason = reason, Facts = head.Facts,
+            UnitId = head.UnitId,
+            Id = Guid.CreateVersion7(),
+            PatientId = head.Id,
+            RecordedAt = at,
+            RecordedBy = actor.Name,
+            Reason = reason,
+            Facts = head.Facts,
         });
     }
 }

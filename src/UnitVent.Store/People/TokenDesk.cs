@@ -47,7 +47,13 @@ public sealed class TokenDesk
                     var token = Prefix + Base64Url.EncodeToString(RandomNumberGenerator.GetBytes(RandomBytes));
                     var row = new ApiTokenRow
                     {
-                        Id = Guid.CreateVersion7(), UnitId = unitId, Role = role, Name = name.Trim(), Hash = HashOf(token), CreatedAt = now, ExpiresAt = now + Duration.Min(validFor ?? Longest, Longest),
+                        Id = Guid.CreateVersion7(),
+                        UnitId = unitId,
+                        Role = role,
+                        Name = name.Trim(),
+                        Hash = HashOf(token),
+                        CreatedAt = now,
+                        ExpiresAt = now + Duration.Min(validFor ?? Longest, Longest),
                     };
                     db.ApiTokens.Add(row);
                     AuditTrail.Add(db, AuditTrail.Everywhere, now, actor, "create-token", row.Id, role.ToString());

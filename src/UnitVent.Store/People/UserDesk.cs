@@ -45,7 +45,11 @@ public sealed class UserDesk
 
             var account = new Account
             {
-                Id = Guid.CreateVersion7(), UserName = userName.Trim(), DisplayName = displayName.Trim(), IsAdministrator = isAdministrator, MustChangePassword = password is null,
+                Id = Guid.CreateVersion7(),
+                UserName = userName.Trim(),
+                DisplayName = displayName.Trim(),
+                IsAdministrator = isAdministrator,
+                MustChangePassword = password is null,
             };
             var secret = password ?? OneTimeCode();
             return Checked(await users.CreateAsync(account, secret), new NewPerson(account.Id, secret));

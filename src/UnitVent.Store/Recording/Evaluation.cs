@@ -58,7 +58,14 @@ internal static class Evaluation
     /// <summary>The event that keeps a flag's numbers of this moment.</summary>
     public static FlagEventRow EventOf(FlagRow flag, FlagStepKind kind, Instant at, string by) => new()
     {
-        UnitId = flag.UnitId, Id = Guid.CreateVersion7(), FlagId = flag.Id, Kind = kind, At = at, By = by, Finding = flag.Finding, InHand = flag.InHand,
+        UnitId = flag.UnitId,
+        Id = Guid.CreateVersion7(),
+        FlagId = flag.Id,
+        Kind = kind,
+        At = at,
+        By = by,
+        Finding = flag.Finding,
+        InHand = flag.InHand,
     };
 
     private static Instant? Soonest(Instant? change, IEnumerable<Instant?> others) => others.Append(change).Where(i => i is not null).DefaultIfEmpty(null).Min();

@@ -28,7 +28,14 @@ internal static class FollowingUp
 
         db.FollowUpSteps.Add(new FollowUpStepRow
         {
-            UnitId = place.UnitId, Id = step.Id, FollowUpId = step.FollowUpId, Step = step.Kind, At = step.Now, By = actor.Name, Reason = step.Reason, ForRole = step.ForRole,
+            UnitId = place.UnitId,
+            Id = step.Id,
+            FollowUpId = step.FollowUpId,
+            Step = step.Kind,
+            At = step.Now,
+            By = actor.Name,
+            Reason = step.Reason,
+            ForRole = step.ForRole,
         });
         AuditTrail.Add(db, place.UnitId, step.Now, actor, "follow-up", step.FollowUpId, step.Kind.ToString());
         await db.SaveChangesAsync(cancellationToken);

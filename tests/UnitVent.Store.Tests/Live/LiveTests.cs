@@ -1,8 +1,8 @@
 using NodaTime;
 using UnitVent.Charting.Results;
+using UnitVent.Store.Flags;
 using UnitVent.Store.Live;
 using UnitVent.Store.Reading;
-using UnitVent.Store.Flags;
 
 namespace UnitVent.Store.Tests.Live;
 

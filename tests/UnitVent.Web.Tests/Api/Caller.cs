@@ -43,7 +43,12 @@ public sealed class Caller(RunningApp app, string? token)
         ["bed"] = bed,
         ["patient"] = new JsonObject
         {
-            ["mrn"] = Guid.NewGuid().ToString("N"), ["familyName"] = familyName ?? "Granit", ["givenName"] = "Test", ["birthDate"] = "1961-02-03", ["sex"] = "female", ["heightCm"] = 165,
+            ["mrn"] = Guid.NewGuid().ToString("N"),
+            ["familyName"] = familyName ?? "Granit",
+            ["givenName"] = "Test",
+            ["birthDate"] = "1961-02-03",
+            ["sex"] = "female",
+            ["heightCm"] = 165,
         },
         ["airwaySecuredAt"] = Ago(3000),
         ["contextFlags"] = new JsonArray("ards"),
@@ -62,19 +67,41 @@ public sealed class Caller(RunningApp app, string? token)
 
     public JsonObject Aprv(double minutesAgo = 100) => new()
     {
-        ["id"] = NewId(), ["effectiveAt"] = Ago(minutesAgo), ["mode"] = "aprv", ["fiO2"] = 0.5, ["pHighCmH2O"] = 28, ["pLowCmH2O"] = 5, ["tHighS"] = 4.5, ["tLowS"] = 0.5,
+        ["id"] = NewId(),
+        ["effectiveAt"] = Ago(minutesAgo),
+        ["mode"] = "aprv",
+        ["fiO2"] = 0.5,
+        ["pHighCmH2O"] = 28,
+        ["pLowCmH2O"] = 5,
+        ["tHighS"] = 4.5,
+        ["tLowS"] = 0.5,
     };
 
     public JsonObject Gas(double minutesAgo = 30) => new()
     {
-        ["id"] = NewId(), ["drawnAt"] = Ago(minutesAgo), ["specimen"] = "arterial", ["pH"] = 7.34, ["pCO2"] = 48, ["pO2"] = 75, ["tensionUnit"] = "mmHg",
-        ["bicarbonateMmolL"] = 25.5, ["bicarbonateKind"] = "actual", ["fiO2"] = 0.5,
+        ["id"] = NewId(),
+        ["drawnAt"] = Ago(minutesAgo),
+        ["specimen"] = "arterial",
+        ["pH"] = 7.34,
+        ["pCO2"] = 48,
+        ["pO2"] = 75,
+        ["tensionUnit"] = "mmHg",
+        ["bicarbonateMmolL"] = 25.5,
+        ["bicarbonateKind"] = "actual",
+        ["fiO2"] = 0.5,
     };
 
     public JsonObject Check(double minutesAgo = 25, double endFlow = 36) => new()
     {
-        ["id"] = NewId(), ["observedAt"] = Ago(minutesAgo), ["settingsConfirmed"] = true, ["peakExpiratoryFlowLMin"] = 60, ["endReleaseFlowLMin"] = endFlow, ["flowReadings"] = 3,
-        ["totalMinuteVolumeLMin"] = 6.6, ["releaseVolumeMl"] = 380, ["spO2Percent"] = 94,
+        ["id"] = NewId(),
+        ["observedAt"] = Ago(minutesAgo),
+        ["settingsConfirmed"] = true,
+        ["peakExpiratoryFlowLMin"] = 60,
+        ["endReleaseFlowLMin"] = endFlow,
+        ["flowReadings"] = 3,
+        ["totalMinuteVolumeLMin"] = 6.6,
+        ["releaseVolumeMl"] = 380,
+        ["spO2Percent"] = 94,
     };
 }
 

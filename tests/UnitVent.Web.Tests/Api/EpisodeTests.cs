@@ -24,7 +24,10 @@ public sealed class EpisodeTests(RunningApp app)
         var caller = await Caller.OfAsync(app);
         var answer = await caller.PostAsync("/units/ICU/episodes", new JsonObject
         {
-            ["id"] = Caller.NewId(), ["patient"] = new JsonObject { ["mrn"] = "1", ["sex"] = "robot", ["shoeSize"] = 42 }, ["contextFlags"] = new JsonArray("tired"), ["color"] = "red",
+            ["id"] = Caller.NewId(),
+            ["patient"] = new JsonObject { ["mrn"] = "1", ["sex"] = "robot", ["shoeSize"] = 42 },
+            ["contextFlags"] = new JsonArray("tired"),
+            ["color"] = "red",
         });
         Assert.Equal(HttpStatusCode.BadRequest, answer.Status);
         Assert.Equal(

@@ -51,7 +51,10 @@ public sealed class ReadingTests(RunningApp app)
         var path = $"/flags/{flag.GetProperty("id").GetString()}/acknowledge";
         var taken = await caller.PostAsync(path, new JsonObject
         {
-            ["id"] = Caller.NewId(), ["plan"] = "look at the curve", ["until"] = caller.Ago(-30), ["told"] = new JsonObject { ["who"] = "Dr Basalt", ["at"] = caller.Ago(0) },
+            ["id"] = Caller.NewId(),
+            ["plan"] = "look at the curve",
+            ["until"] = caller.Ago(-30),
+            ["told"] = new JsonObject { ["who"] = "Dr Basalt", ["at"] = caller.Ago(0) },
         });
         Assert.Equal(HttpStatusCode.OK, taken.Status);
         Assert.Equal("Dr Basalt", taken.Json.GetProperty("acknowledged").GetProperty("told").GetProperty("who").GetString());

@@ -24,18 +24,38 @@ internal static class ScreenChart
 
     public static SettingChange Aprv(double minutesAgo, decimal high = 28, decimal fiO2 = 0.5m) => new()
     {
-        ChangedAt = Ago(minutesAgo), Mode = VentilationMode.Aprv, PHighCmH2O = high, PLowCmH2O = 5, THighS = 4.5m, TLowS = 0.5m, FiO2 = fiO2, TubeCompensation = TubeCompensation.On,
+        ChangedAt = Ago(minutesAgo),
+        Mode = VentilationMode.Aprv,
+        PHighCmH2O = high,
+        PLowCmH2O = 5,
+        THighS = 4.5m,
+        TLowS = 0.5m,
+        FiO2 = fiO2,
+        TubeCompensation = TubeCompensation.On,
     };
 
     public static BloodGas Gas(double minutesAgo, decimal pO2, decimal pH = 7.40m, Specimen specimen = Specimen.Arterial) => new()
     {
-        DrawnAt = Ago(minutesAgo), Specimen = specimen, TensionUnit = TensionUnit.MmHg, PH = pH, PCO2 = 45, PO2 = pO2,
+        DrawnAt = Ago(minutesAgo),
+        Specimen = specimen,
+        TensionUnit = TensionUnit.MmHg,
+        PH = pH,
+        PCO2 = 45,
+        PO2 = pO2,
     };
 
     public static VentilatorCheck Check(double minutesAgo) => new()
     {
-        ObservedAt = Ago(minutesAgo), SettingsConfirmed = true, TotalMinuteVolumeLMin = 6.6m, TotalRatePerMin = 22, ReleaseVolumeMl = 420, ReleasesAveraged = 3,
-        PeakExpiratoryFlowLMin = 60, EndReleaseFlowLMin = 33, FlowReadings = 3, SpO2Percent = 93,
+        ObservedAt = Ago(minutesAgo),
+        SettingsConfirmed = true,
+        TotalMinuteVolumeLMin = 6.6m,
+        TotalRatePerMin = 22,
+        ReleaseVolumeMl = 420,
+        ReleasesAveraged = 3,
+        PeakExpiratoryFlowLMin = 60,
+        EndReleaseFlowLMin = 33,
+        FlowReadings = 3,
+        SpO2Percent = 93,
     };
 
     public static PatientPicture Picture(params Entry[] bodies) => Picture("1", bodies);
@@ -52,7 +72,8 @@ internal static class ScreenChart
         Guid.CreateVersion7(),
         Guid.Empty,
         new Finding("R25", family, severity, says, "position, secretions", Ago(20), new Dictionary<string, double>(), []),
-        Ago(20)) { InHand = inHand };
+        Ago(20))
+    { InHand = inHand };
 
     public static PatientRow Row(PatientPicture picture, params Flag[] open) => new(picture, Standing.Of(open, picture), Now);
 }
