@@ -11,7 +11,7 @@ public static class Serve
 
     public static async Task<int> RunAsync(Wishes wishes, CancellationToken cancel)
     {
-        var builder = WebApplication.CreateBuilder(wishes.HostArguments);
+        var builder = WebApplication.CreateBuilder(new WebApplicationOptions { Args = wishes.HostArguments, ContentRootPath = AppContext.BaseDirectory });
         var settings = HostSettings.From(builder.Configuration);
         await using var database = await Database.OpenAsync(settings, cancel);
         await database.MigrateAsync(cancel);

@@ -10,7 +10,10 @@ export function keepLook(look) {
   return look === "dark" || (look === "auto" && matchMedia("(prefers-color-scheme: dark)").matches);
 }
 
-export const keepUnit = code => keep("unit", encodeURIComponent(code));
+export function keepUnit(code, zone) {
+  keep("unit", encodeURIComponent(code));
+  document.documentElement.dataset.zone = zone;
+}
 
 export function watchInput(session) {
   let said = Date.now();

@@ -7,9 +7,8 @@ modal.addEventListener("components-reconnect-state-changed", event => {
   const state = event.detail.state;
   document.documentElement.toggleAttribute("data-stale", state !== "hide");
   if (state === "show") {
-    const now = new Date();
-    document.getElementById("lost-since").textContent =
-      `${String(now.getHours()).padStart(2, "0")}:${String(now.getMinutes()).padStart(2, "0")}`;
+    const clock = new Intl.DateTimeFormat("en-GB", { hour: "2-digit", minute: "2-digit", timeZone: document.documentElement.dataset.zone });
+    document.getElementById("lost-since").textContent = clock.format(new Date());
   }
   if (state === "rejected" || state === "failed" || state === "resume-failed") reloadWhenAlive();
 });
