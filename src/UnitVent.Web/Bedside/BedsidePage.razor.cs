@@ -20,6 +20,7 @@ public sealed partial class BedsidePage
     private const int EntriesAPage = 25;
 
     private readonly CancellationTokenSource left = new();
+    private readonly CancellationToken leaving;
     private PatientChart? chart;
     private PatientRow? row;
     private Actor actor = CurrentActor.Nobody;
@@ -35,6 +36,8 @@ public sealed partial class BedsidePage
     private Instant now;
     private Instant? lostSince;
     private string? refused;
+
+    public BedsidePage() => leaving = left.Token;
 
     [Parameter]
     public Guid Id { get; set; }
@@ -69,8 +72,8 @@ public sealed partial class BedsidePage
 
     private async Task LoadAsync()
     {
-        var me = await Me.GetAsync(left.Token);
-        var loaded = await Charts.PatientAsync(me, Id, null, left.Token);
+        var me = await Me.GetAsync(leaving);
+        var loaded = await Charts.PatientAsync(me, Id, null, leaving);
         now = Clock.GetCurrentInstant();
         lostSince = loaded.Succeeded && Feed.Connected ? null : lostSince ?? (chart is null ? null : now);
         if (!loaded.Succeeded)
@@ -94,9 +97,9 @@ public sealed partial class BedsidePage
 
     private async Task LoadPanelsAsync()
     {
-        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(Limit: EntriesAPage), left.Token);
+        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(Limit: EntriesAPage), leaving);
         (entries, older) = page.Succeeded ? ([.. page.Value.Items], page.Value.Next) : (entries, older);
-        var all = await Charts.FlagsAsync(actor, Id, true, left.Token);
+        var all = await Charts.FlagsAsync(actor, Id, true, leaving);
         flags = all.Succeeded ? all.Value : flags;
         await ShowAsync(range);
     }
@@ -104,13 +107,13 @@ public sealed partial class BedsidePage
     private async Task ShowAsync(TimelineRange wanted)
     {
         range = wanted;
-        var loaded = await Charts.TimelineAsync(actor, Id, wanted.From(chart!.Picture), chart.Picture.AsOf, left.Token);
+        var loaded = await Charts.TimelineAsync(actor, Id, wanted.From(chart!.Picture), chart.Picture.AsOf, leaving);
         timeline = loaded.Succeeded ? loaded.Value : timeline;
     }
 
     private async Task OlderAsync()
     {
-        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(After: older, Limit: EntriesAPage), left.Token);
+        var page = await Charts.EntriesAsync(actor, Id, new EntryQuery(After: older, Limit: EntriesAPage), leaving);
         if (page.Succeeded)
         {
             entries!.AddRange(page.Value.Items);

@@ -14,16 +14,20 @@ public sealed partial class BoardPage
     private static readonly TimeSpan AgesCount = TimeSpan.FromSeconds(30);
 
     private readonly CancellationTokenSource left = new();
+    private readonly CancellationToken leaving;
     private UnitBoard? board;
     private BoardView view = new([], BoardFilter.All[0], false, []);
     private Actor? actor;
     private Instant now;
     private Instant? lostSince;
     private string? refused;
+    private string moved = "";
     private Guid? opened;
     private bool admitting;
     private ChartingSession? session;
     private IDisposable? subscription;
+
+    public BoardPage() => leaving = left.Token;
 
     [Parameter]
     public string? Code { get; set; }
@@ -78,8 +82,8 @@ public sealed partial class BoardPage
             return;
         }
 
-        var me = await Me.GetAsync(left.Token);
-        var loaded = await Boards.GetAsync(me, code, left.Token);
+        var me = await Me.GetAsync(leaving);
+        var loaded = await Boards.GetAsync(me, code, leaving);
         if (loaded.Succeeded)
         {
             (board, actor, refused) = (loaded.Value, me, null);
@@ -111,7 +115,7 @@ public sealed partial class BoardPage
         using var timer = new PeriodicTimer(AgesCount);
         try
         {
-            while (await timer.WaitForNextTickAsync(left.Token))
+            while (await timer.WaitForNextTickAsync(leaving))
             {
                 await InvokeAsync(async () =>
                 {
@@ -126,12 +130,23 @@ public sealed partial class BoardPage
         }
     }
 
+    private async Task FindUnitsAsync()
+    {
+        await Place.LoadAsync(Code, leaving);
+        await LoadAsync();
+    }
+
     private void Draw()
     {
         now = Clock.GetCurrentInstant();
-        view = board is null
-            ? view
-            : new([.. board.Rows.Select(r => new PatientRow(r.Picture, r.Standing, now))], BoardFilter.Named(Show), Order == "bed", board.Unit.Beds);
+        if (board is null)
+        {
+            return;
+        }
+
+        var before = view;
+        view = new([.. board.Rows.Select(r => new PatientRow(r.Picture, r.Standing, now))], BoardFilter.Named(Show), Order == "bed", board.Unit.Beds);
+        moved = BandMoves.Between(before.All, view.All);
     }
 
     private void Toggle(PatientRow row) => opened = opened == row.EpisodeId ? null : row.EpisodeId;

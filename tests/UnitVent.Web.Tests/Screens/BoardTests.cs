@@ -99,6 +99,15 @@ public sealed class BoardTests : BunitContext
         Assert.Equal("down from 188 at 09:05", columns.PfDirection);
     }
 
+    [Fact]
+    public void Moves_BetweenTwoBoards_AreSaidAloudAndNothingElse()
+    {
+        var worse = Quiet with { Standing = Standing.Of([ScreenChart.Flag(Severity.Urgent, "SpO2 84 %")], Quiet.Picture) };
+
+        Assert.Equal("Bed 1: Look now.", BandMoves.Between([Urgent, Quiet], [Urgent, worse]));
+        Assert.Equal("", BandMoves.Between([Urgent, Quiet], [Urgent, Quiet]));
+    }
+
     private static string Cell(AngleSharp.Dom.IElement row, string label) => row.QuerySelector($"[data-label='{label}']")!.FirstChild!.TextContent;
 
     private IRenderedComponent<BoardTable> Draw(IReadOnlyList<PatientRow> rows, bool walking) => Render<BoardTable>(p => p
