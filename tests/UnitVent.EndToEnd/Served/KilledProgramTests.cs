@@ -10,6 +10,8 @@ public sealed class KilledProgramTests : IDisposable
 {
     private const int Writers = 4;
 
+    private static readonly TimeSpan WritingTime = TimeSpan.FromSeconds(6);
+
     private readonly string folder = Directory.CreateTempSubdirectory("unitvent-killed-").FullName;
 
     public void Dispose() => Directory.Delete(folder, recursive: true);
@@ -23,7 +25,7 @@ public sealed class KilledProgramTests : IDisposable
         Assert.StartsWith("uv_", token);
         var episodes = await Task.WhenAll(Enumerable.Range(1, Writers).Select(bed => AdmitAsync(program, token, bed)));
         var writing = episodes.Select(e => WriteUntilDeadAsync(program, token, e)).ToList();
-        await Task.Delay(TimeSpan.FromSeconds(2), TestContext.Current.CancellationToken);
+        await Task.Delay(WritingTime, TestContext.Current.CancellationToken);
         await program.KillAsync();
         var notes = await Task.WhenAll(writing);
         await program.DisposeAsync();
