@@ -29,6 +29,7 @@ public static class WebServices
         builder.Services.AddAccounts();
         builder.Services.AddCookieRules();
         builder.Services.Configure<ForwardedHeadersOptions>(o => o.ForwardedHeaders = ForwardedHeaders.XForwardedFor | ForwardedHeaders.XForwardedProto);
+        builder.Services.AddHsts(hsts => (hsts.MaxAge, hsts.IncludeSubDomains) = (TimeSpan.FromDays(365), true));
         builder.Services.AddRateLimits();
         builder.Services.AddApi();
         builder.Services.AddSingleton<Sheets>();
