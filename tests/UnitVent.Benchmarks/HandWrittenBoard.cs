@@ -22,7 +22,8 @@ internal sealed class HandWrittenBoard : IAsyncDisposable
 
     private const string Entries = """
         with wanted as (select id from episode where unit_id = $1 and ended_at is null)
-        select e.id, e.episode_id, e.kind, e.effective_at, e.recorded_at, e.recorded_by, e.sequence, e.body
+        select e.id, e.unit_id, e.episode_id, e.kind, e.effective_at, e.recorded_at, e.recorded_by, e.recorded_by_id, e.sequence, e.corrects,
+               e.correction_reason, e.confirmed, e.body
         from wanted w
         cross join lateral (
             select * from entry s where s.unit_id = $1 and s.episode_id = w.id and s.effective_at > $2 and s.effective_at <= $3
