@@ -55,7 +55,7 @@ public static class UnitSheet
         return Row.Of(
             now.Window.Episode.Bed,
             $"{facts.DisplayName()}\nMRN {facts.Mrn}",
-            $"{(now.Settings is { } settings ? Words.Of(settings.Body) : "none charted")}\n{Numbers.Bare(now[ValueNames.VentilatorDays]) ?? "–"}",
+            $"{(now.Settings is { } settings ? Words.Of(settings.Body) : "none charted")}\n{Printed.Bare(now[ValueNames.VentilatorDays]) ?? "–"}",
             new Cell(Stands(standing, times), Mark: Marks.Of(standing.Band)),
             InHandAndDue(patient, times));
     }

@@ -2,6 +2,7 @@ using NodaTime;
 using UnitVent.Charting.Flags;
 using UnitVent.Charting.Pictures;
 using UnitVent.Charting.Rules;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Bands;
 
@@ -66,6 +67,6 @@ public sealed record Standing(Band Band, string Why, Instant? Since, IReadOnlyLi
         var behind = finding.Entries.Count > 0 ? picture.Window.Standing.FirstOrDefault(e => e.Id == finding.Entries[0]) : null;
         var late = behind is not null && behind.RecordedAt - behind.EffectiveAt > LateAfter ? " · late entry" : "";
         var rechecked = picture.AsOf - finding.SeenAt > picture.Limits.Gas ? ", not rechecked" : "";
-        return $" · {Wording.Clock(finding.SeenAt, picture)}{rechecked}{late}";
+        return $" · {Times.Clock(finding.SeenAt, picture)}{rechecked}{late}";
     }
 }

@@ -15,15 +15,16 @@ internal static class BodyValues
         var sex = s.Patient.Sex is { } known
             ? new Given("sex", known == Episodes.Sex.Female ? "sex (female)" : "sex (male)", "", (int)known, null, null)
             : Given.Missing("sex", "sex");
-        yield return new Formula(ValueNames.PredictedBodyWeightKg, "kg", "A1").Of(
+        var female = s.Patient.Sex == Episodes.Sex.Female;
+        yield return (female ? Equations.PredictedBodyWeightFemale : Equations.PredictedBodyWeightMale).Of(
             [height, sex],
-            v => PredictedBodyWeight.Compute(v[1] == (int)Episodes.Sex.Female ? LungSizeSex.Female : LungSizeSex.Male, BodyHeight.FromCentimetres(v[0])).Kilograms,
+            v => PredictedBodyWeight.Compute(female ? LungSizeSex.Female : LungSizeSex.Male, BodyHeight.FromCentimetres(v[0])).Kilograms,
             doubt: _ => Doubt(s));
         var secured = s.Window.Episode.AirwaySecuredAt;
-        yield return new Formula(ValueNames.VentilatorDays, "d", "A31").Of(
-            [new Given("airwaySecuredAt", "airway secured", "", 0, secured, null)],
-            _ => (s.Now - secured).TotalDays,
-            _ => s.Now < secured ? "the airway was secured later." : null);
+        yield return Equations.VentilatorDays.Of(
+            [new Given("sinceAirwaySecuredH", "time since the airway was secured", "h", (s.Now - secured).TotalHours, secured, null)],
+            v => v[0] / 24,
+            v => v[0] < 0 ? "the airway was secured later." : null);
     }
 
     /// <summary>Why predicted body weight is less certain than usual; null when it is not.</summary>

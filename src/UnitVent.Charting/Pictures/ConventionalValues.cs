@@ -18,27 +18,26 @@ internal static class ConventionalValues
         var peep = s.SettingAt(check, "peepCmH2O", "PEEP", "cmH2O", x => x.PeepCmH2O);
         var auto = check is { } c && c.Body.AutoPeepCmH2O is not null ? new[] { s.FromCheck(check, "autoPeepCmH2O", "auto-PEEP", "cmH2O", x => x.AutoPeepCmH2O) } : [];
         var volume = s.FromCheck(check, "tidalVolumeMl", "tidal volume", "mL", x => x.TidalVolumeMl);
-        var driving = Static(s, new(ValueNames.DrivingPressureCmH2O, "cmH2O", "A18"), [plateau, peep, .. auto], check,
+        var driving = Static(s, Equations.DrivingPressure, [plateau, peep, .. auto], check,
             v => StaticMechanics.DrivingPressure(Pressure(v[0]), Pressure(v[1] + v.ElementAtOrDefault(2))).CmH2O);
         yield return driving;
-        yield return Static(s, new(ValueNames.StaticCompliance, "mL/cmH2O", "A18"), [plateau, peep, volume, .. auto], check,
+        yield return Static(s, Equations.StaticCompliance, [plateau, peep, volume, .. auto], check,
             v => StaticMechanics.StaticCompliance(GasVolume.FromMillilitres(v[2]), Pressure(v[0]), Pressure(v[1] + v.ElementAtOrDefault(3))).MlPerCmH2O);
         yield return Power(s, OxygenValues.AsInput(driving, "driving pressure"));
     }
 
     private static PictureValue PerKilogram(PictureSources s)
     {
-        var formula = new Formula(ValueNames.TidalVolumePerKg, "mL/kg", "A2");
         var volume = s.FromCheck(s.CheckWith(c => c.TidalVolumeMl is not null), "tidalVolumeMl", "tidal volume", "mL", c => c.TidalVolumeMl);
         return s.Mode == VentilationMode.Aprv
-            ? formula.Without(ValueState.Mode, "Not defined in APRV: see the release volume.")
-            : formula.Of([volume, s.PredictedWeight()], v => VolumePerKilogram.Compute(GasVolume.FromMillilitres(v[0]), BodyMass.FromKilograms(v[1])), doubt: _ => BodyValues.Doubt(s));
+            ? Equations.TidalVolumePerKg.Without(ValueState.Mode, "Not defined in APRV: see the release volume.")
+            : Equations.TidalVolumePerKg.Of([volume, s.PredictedWeight()], v => VolumePerKilogram.Compute(GasVolume.FromMillilitres(v[0]), BodyMass.FromKilograms(v[1])), doubt: _ => BodyValues.Doubt(s));
     }
 
-    private static PictureValue Static(PictureSources s, Formula formula, Given[] inputs, Charted<VentilatorCheck>? check, Func<double[], double> compute) =>
+    private static PictureValue Static(PictureSources s, Equation equation, Given[] inputs, Charted<VentilatorCheck>? check, Func<double[], double> compute) =>
         s.Mode == VentilationMode.Aprv
-            ? formula.Without(ValueState.Mode, NotInAprv)
-            : formula.Of(inputs, compute, v => v[0] <= v[1] ? "the plateau is not above PEEP." : null, _ => Doubt(s, check));
+            ? equation.Without(ValueState.Mode, NotInAprv)
+            : equation.Of(inputs, compute, v => v[0] <= v[1] ? "the plateau is not above PEEP." : null, _ => Doubt(s, check));
 
     private static string? Doubt(PictureSources s, Charted<VentilatorCheck>? check) =>
         s.Mode is VentilationMode.PressureSupport or VentilationMode.Cpap || check?.Body.Passive == false ? "outside validated range: the patient breathes actively."
@@ -47,23 +46,22 @@ internal static class ConventionalValues
 
     private static PictureValue Power(PictureSources s, Given driving)
     {
-        var formula = new Formula(ValueNames.MechanicalPowerJMin, "J/min", "A30");
         var check = s.CheckWith(c => c is { TidalVolumeMl: not null, PeakPressureCmH2O: not null });
         var rate = s.FromCheck(check, "totalRatePerMin", "total rate", "/min", c => c.TotalRatePerMin);
         var volume = s.FromCheck(check, "tidalVolumeMl", "tidal volume", "mL", c => c.TidalVolumeMl);
         var settings = check is { } c ? InForce.Settings(s.Window, c.At) : s.Settings;
         return s.Mode switch
         {
-            VentilationMode.Aprv => formula.Without(ValueState.Mode, "No agreed way to compute mechanical power in APRV."),
-            VentilationMode.VolumeControl => formula.Of(
+            VentilationMode.Aprv => Equations.PowerVolumeControlled.Without(ValueState.Mode, "No agreed way to compute mechanical power in APRV."),
+            VentilationMode.VolumeControl => Equations.PowerVolumeControlled.Of(
                 [rate, volume, s.FromCheck(check, "peakPressureCmH2O", "peak pressure", "cmH2O", x => x.PeakPressureCmH2O), driving],
                 v => MechanicalPower.VolumeControlled(BreathRate.FromPerMinute(v[0]), GasVolume.FromMillilitres(v[1]), Pressure(v[2]), Pressure(v[3]))),
-            VentilationMode.PressureControl => formula.Of(
+            VentilationMode.PressureControl => Equations.PowerPressureControlled.Of(
                 [rate, volume, PictureSources.Setting(settings, "inspiratoryPressureAbovePeepCmH2O", "inspiratory pressure", "cmH2O", x => x.InspiratoryPressureAbovePeepCmH2O),
                  PictureSources.Setting(settings, "peepCmH2O", "PEEP", "cmH2O", x => x.PeepCmH2O)],
                 v => MechanicalPower.PressureControlled(BreathRate.FromPerMinute(v[0]), GasVolume.FromMillilitres(v[1]), Pressure(v[2]), Pressure(v[3]))),
-            null => formula.Without(ValueState.Missing, "Needs settings."),
-            _ => formula.Without(ValueState.Mode, "Not defined in this mode."),
+            null => Equations.PowerVolumeControlled.Without(ValueState.Missing, "Needs settings."),
+            _ => Equations.PowerVolumeControlled.Without(ValueState.Mode, "Not defined in this mode."),
         };
     }
 

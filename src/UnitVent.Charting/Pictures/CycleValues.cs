@@ -14,17 +14,16 @@ internal static class CycleValues
         yield return Measured(s);
         var tHigh = s.SettingNow("tHighS", "T high", "s", x => x.THighS);
         var tLow = s.SettingNow("tLowS", "T low", "s", x => x.TLowS);
-        yield return InAprv(s, new(ValueNames.CycleTimeS, "s", "A9"), [tHigh, tLow], v => ReleaseCycle.CycleTime(Time(v[0]), Time(v[1])).Seconds);
-        yield return InAprv(s, new(ValueNames.ReleaseRatePerMin, "/min", "A9"), [tHigh, tLow], v => ReleaseCycle.Rate(Time(v[0]), Time(v[1])).PerMinute);
-        yield return InAprv(s, new(ValueNames.TimeRatio, ":1", "A9"), [tHigh, tLow], v => ReleaseCycle.Ratio(Time(v[0]), Time(v[1])));
-        yield return InAprv(s, new(ValueNames.ShareAtPHighPercent, "%", "A9"), [tHigh, tLow], v => ReleaseCycle.ShareAtHighPercent(Time(v[0]), Time(v[1])));
-        yield return new Formula(ValueNames.MeanAlveolarPressureCmH2O, "cmH2O", "A15", ValueKind.Estimated)
-            .Without(ValueState.Missing, "Needs inspiratory and expiratory resistance.");
+        yield return InAprv(s, Equations.CycleTime, [tHigh, tLow], v => ReleaseCycle.CycleTime(Time(v[0]), Time(v[1])).Seconds);
+        yield return InAprv(s, Equations.ReleaseRate, [tHigh, tLow], v => ReleaseCycle.Rate(Time(v[0]), Time(v[1])).PerMinute);
+        yield return InAprv(s, Equations.TimeRatio, [tHigh, tLow], v => ReleaseCycle.Ratio(Time(v[0]), Time(v[1])));
+        yield return InAprv(s, Equations.ShareAtPHigh, [tHigh, tLow], v => ReleaseCycle.ShareAtHighPercent(Time(v[0]), Time(v[1])));
+        yield return Equations.MeanAlveolarPressure.Without(ValueState.Missing, "Needs inspiratory and expiratory resistance.");
     }
 
     /// <summary>A value that only APRV has; in another mode it says so.</summary>
-    public static PictureValue InAprv(PictureSources s, Formula formula, Given[] inputs, Func<double[], double> compute, Func<double[], string?>? undefined = null, Func<double[], string?>? doubt = null) =>
-        s.Mode is null or VentilationMode.Aprv ? formula.Of(inputs, compute, undefined, doubt) : formula.Without(ValueState.Mode, OnlyAprv);
+    public static PictureValue InAprv(PictureSources s, Equation equation, Given[] inputs, Func<double[], double> compute, Func<double[], string?>? undefined = null, Func<double[], string?>? doubt = null) =>
+        s.Mode is null or VentilationMode.Aprv ? equation.Of(inputs, compute, undefined, doubt) : equation.Without(ValueState.Mode, OnlyAprv);
 
     private static PictureValue Confirmed(PictureSources s, PictureValue mean)
     {
@@ -34,7 +33,8 @@ internal static class CycleValues
             : mean;
     }
 
-    private static PictureValue Measured(PictureSources s) => new Formula(ValueNames.MeanAirwayPressureMeasured, "cmH2O", "").Measured(
+    private static PictureValue Measured(PictureSources s) => Formula.Measured(
+        ValueNames.MeanAirwayPressureMeasured,
         s.FromCheck(s.CheckWith(c => c.MeanAirwayPressureCmH2O is not null), "meanAirwayPressureCmH2O", "mean airway pressure", "cmH2O", c => c.MeanAirwayPressureCmH2O));
 
     private static BreathTime Time(double seconds) => BreathTime.FromSeconds(seconds);

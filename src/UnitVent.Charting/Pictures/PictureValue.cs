@@ -1,4 +1,5 @@
 using NodaTime;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Pictures;
 
@@ -9,7 +10,7 @@ namespace UnitVent.Charting.Pictures;
 /// <param name="State">How far it can be had.</param>
 /// <param name="Because">One sentence when the state is not <see cref="ValueState.Ok"/>; null otherwise.</param>
 /// <param name="Kind">Where it comes from.</param>
-/// <param name="Equation">The equation's id; empty for measured values.</param>
+/// <param name="Equation">The equation; null for measured values.</param>
 /// <param name="AsOf">The time of its oldest reading; of its settings when it rests on nothing else; null without either.</param>
 /// <param name="Inputs">What it was made from.</param>
 public sealed record PictureValue(
@@ -19,6 +20,12 @@ public sealed record PictureValue(
     ValueState State,
     string? Because,
     ValueKind Kind,
-    string Equation,
+    Equation? Equation,
     Instant? AsOf,
-    IReadOnlyList<Reading> Inputs);
+    IReadOnlyList<Reading> Inputs)
+{
+    /// <summary>Gets the equation with the numbers put in and the result, rounded as it is shown; null where nothing was computed.</summary>
+    public string? Working => Value is { } value && Equation is { } equation && ValueWords.Of(Name) is { } words
+        ? $"{equation.WithNumbers(Inputs)} → {Numbers.Fixed(value, words.Decimals)} {Unit}".TrimEnd()
+        : null;
+}

@@ -17,10 +17,10 @@ internal static class SplitValues
         var measured = s.FromCheck(
             s.CheckWith(c => c.SpontaneousMinuteVolumeLMin is not null), "spontaneousMinuteVolumeLMin", "own minute volume", "L/min", c => c.SpontaneousMinuteVolumeLMin);
         var own = measured.State == ValueState.Ok
-            ? new Formula(ValueNames.SpontaneousMinuteVolumeLMin, "L/min", "").Measured(measured)
+            ? Formula.Measured(ValueNames.SpontaneousMinuteVolumeLMin, measured)
             : derived with { Name = ValueNames.SpontaneousMinuteVolumeLMin };
         yield return own;
-        yield return new Formula(ValueNames.SpontaneousSharePercent, "%", "A10").Of(
+        yield return Equations.OwnShare.Of(
             [OxygenValues.AsInput(own, "own minute volume"), total],
             v => MinuteVentilationSplit.Share(MinuteVentilation.FromLitresPerMinute(v[0]), MinuteVentilation.FromLitresPerMinute(v[1])),
             v => v[0] > v[1] ? "own minute volume exceeds the total." : null);
@@ -35,7 +35,7 @@ internal static class SplitValues
             : [s.SettingAt(check, "tHighS", "T high", "s", x => x.THighS), s.SettingAt(check, "tLowS", "T low", "s", x => x.TLowS)];
         return CycleValues.InAprv(
             s,
-            new(ValueNames.ReleaseMinuteVolumeLMin, "L/min", "A10"),
+            rate.Length == 1 ? Equations.ReleaseMinuteVolume : Equations.ReleaseMinuteVolumeBySettings,
             [s.FromCheck(check, "releaseVolumeMl", "release volume", "mL", c => c.ReleaseVolumeMl), .. rate],
             v => MinuteVentilationSplit.Release(
                 GasVolume.FromMillilitres(v[0]),
@@ -44,7 +44,7 @@ internal static class SplitValues
 
     private static PictureValue Derived(PictureSources s, Given total, Given release) => CycleValues.InAprv(
         s,
-        new(ValueNames.SpontaneousMinuteVolumeDerivedLMin, "L/min", "A10"),
+        Equations.OwnMinuteVolumeDerived,
         [total, release],
         v => MinuteVentilationSplit.DeriveSpontaneous(Flow(v[0]), Flow(v[1])).Spontaneous.LitresPerMinute,
         v => MinuteVentilationSplit.ReleaseExceedsTotal(Flow(v[0]), Flow(v[1])) ? "release volume times rate exceeds the total minute volume; one of the three is wrong." : null,
@@ -53,7 +53,7 @@ internal static class SplitValues
     private static PictureValue RapidShallow(PictureSources s)
     {
         var check = s.CheckWith(c => c is { SpontaneousRatePerMin: not null, SpontaneousTidalVolumeMl: not null });
-        return new Formula(ValueNames.RapidShallowIndex, "/min/L", "A29").Of(
+        return Equations.RapidShallow.Of(
             [s.FromCheck(check, "spontaneousRatePerMin", "own rate", "/min", c => c.SpontaneousRatePerMin),
              s.FromCheck(check, "spontaneousTidalVolumeMl", "own tidal volume", "mL", c => c.SpontaneousTidalVolumeMl)],
             v => RapidShallowBreathing.Compute(BreathRate.FromPerMinute(v[0]), GasVolume.FromMillilitres(v[1])),

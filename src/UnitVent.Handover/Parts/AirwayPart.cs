@@ -22,9 +22,9 @@ internal static class AirwayPart
     private static IEnumerable<KeyValue> Tube(AirwayCheck check)
     {
         var kind = check.Airway is { } airway ? Words.Of(airway) : "kind not recorded";
-        yield return new("Tube", $"{kind}, {Numbers.Typed(check.SizeMm, "mm")}, at {Numbers.Typed(check.DepthCm, "cm")}");
+        yield return new("Tube", $"{kind}, {Printed.Typed(check.SizeMm, "mm")}, at {Printed.Typed(check.DepthCm, "cm")}");
         yield return new("Fixed", check.TubeFixedAt ?? "not recorded");
-        yield return new("Cuff", Numbers.Typed(check.CuffPressureCmH2O, "cmH2O"));
+        yield return new("Cuff", Printed.Typed(check.CuffPressureCmH2O, "cmH2O"));
         yield return new("Humidifier", check.Humidifier is { } humidifier ? Words.Spelled(humidifier) : "not recorded");
     }
 }

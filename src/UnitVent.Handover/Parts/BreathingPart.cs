@@ -15,7 +15,7 @@ internal static class BreathingPart
         [
             new("SpO2", Saturation(part)),
             part.Value("Own share of ventilation", ValueNames.SpontaneousSharePercent),
-            new("RASS", Seen(part, check => check.RassNotAssessable == true ? "not assessable" : check.Rass is { } score ? Numbers.Typed(score) : null)),
+            new("RASS", Seen(part, check => check.RassNotAssessable == true ? "not assessable" : check.Rass is { } score ? Printed.Typed(score) : null)),
             new("Relaxant", Seen(part, check => check.Relaxant is { } relaxant ? Words.Spelled(relaxant) : null)),
         ]),
     ];
@@ -34,7 +34,7 @@ internal static class BreathingPart
             (null, { } b) => Text(b.Body.SpO2Percent, b.At),
         };
 
-        string Text(decimal? percent, NodaTime.Instant at) => $"{Numbers.Typed(percent, "%")}, {part.Times.At(at)}";
+        string Text(decimal? percent, NodaTime.Instant at) => $"{Printed.Typed(percent, "%")}, {part.Times.At(at)}";
     }
 
     /// <summary>The latest observation of its kind, however many checks ago.</summary>

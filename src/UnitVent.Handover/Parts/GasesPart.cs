@@ -41,19 +41,19 @@ internal static class GasesPart
         var (slip, unit) = (gas.Gas.Body, sharedUnit is null ? Unit(gas.Gas.Body.TensionUnit) : "");
         return Row.Of(
             part.Times.At(gas.Gas.At),
-            slip.PH is { } pH ? Numbers.AcidBase(pH) : "–",
-            slip.PCO2 is { } pCO2 ? Numbers.WithUnit(Numbers.Typed(pCO2), unit) : "–",
-            slip.PO2 is { } pO2 ? Numbers.WithUnit(Numbers.Typed(pO2), unit) : "–",
-            slip.LactateMmolL is { } lactate ? Numbers.Typed(lactate) : "–",
-            (slip.FiO2 ?? gas.Settings?.Body.FiO2) is { } fiO2 ? Numbers.Typed(fiO2) : "–",
-            new Cell(Numbers.Bare(gas.Values[ValueNames.PfRatio]) ?? "–", IsStrong: true),
+            slip.PH is { } pH ? Printed.AcidBase(pH) : "–",
+            slip.PCO2 is { } pCO2 ? Printed.WithUnit(Printed.Typed(pCO2), unit) : "–",
+            slip.PO2 is { } pO2 ? Printed.WithUnit(Printed.Typed(pO2), unit) : "–",
+            slip.LactateMmolL is { } lactate ? Printed.Typed(lactate) : "–",
+            (slip.FiO2 ?? gas.Settings?.Body.FiO2) is { } fiO2 ? Printed.Typed(fiO2) : "–",
+            new Cell(Printed.Bare(gas.Values[ValueNames.PfRatio]) ?? "–", IsStrong: true),
             MeanPressure(gas),
             $"{(gas.Prone ? "prone" : "not prone")}{(gas.Unsettled ? ", not settled" : "")}");
     }
 
     private static string MeanPressure(PairedGas gas) =>
-        Numbers.Bare(gas.Values[ValueNames.MeanAirwayPressureComputed])
-        ?? (Numbers.Bare(gas.Values[ValueNames.MeanAirwayPressureMeasured]) is { } measured ? $"{measured} measured" : "–");
+        Printed.Bare(gas.Values[ValueNames.MeanAirwayPressureComputed])
+        ?? (Printed.Bare(gas.Values[ValueNames.MeanAirwayPressureMeasured]) is { } measured ? $"{measured} measured" : "–");
 
     private static IEnumerable<string> Missing(SheetPart part, PairedGas gas)
     {

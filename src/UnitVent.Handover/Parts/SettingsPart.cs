@@ -67,10 +67,10 @@ internal static class SettingsPart
     private static string Text(EntryField field, SettingChange settings) => field.ValueIn(settings) switch
     {
         null => "–",
-        decimal number when field.Name == "pressureSupportCmH2O" => $"{Numbers.Typed(number)}{Reference(settings.PressureSupportReference)}",
-        decimal number => Numbers.Typed(number),
+        decimal number when field.Name == "pressureSupportCmH2O" => $"{Printed.Typed(number)}{Reference(settings.PressureSupportReference)}",
+        decimal number => Printed.Typed(number),
         ReleaseEnd end => Words.Spelled(end),
-        TubeCompensation compensation when settings.TubeCompensationPercent is { } percent => $"{Words.Spelled(compensation)}, {Numbers.Typed(percent, "%")}",
+        TubeCompensation compensation when settings.TubeCompensationPercent is { } percent => $"{Words.Spelled(compensation)}, {Printed.Typed(percent, "%")}",
         TubeCompensation compensation => Words.Spelled(compensation),
         var other => throw new NotSupportedException($"{other.GetType().Name} has no words on a sheet."),
     };

@@ -19,6 +19,6 @@ internal sealed record SheetPart(SheetInput Input, Times Times)
     {
         var value = Now[name];
         var at = value is { Value: not null, AsOf: { } asOf } ? $", {Times.At(asOf)}" : "";
-        return new KeyValue(label, Numbers.Known(value) + at);
+        return new KeyValue(label, Printed.Known(value) + at);
     }
 }

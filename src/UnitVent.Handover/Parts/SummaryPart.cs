@@ -23,21 +23,21 @@ internal static class SummaryPart
     ];
 
     private static string Ventilated(SheetPart part) =>
-        $"{Numbers.Bare(part.Now[ValueNames.VentilatorDays]) ?? "not known:"} days, since {part.Times.OnDay(part.Now.Window.Episode.AirwaySecuredAt)}";
+        $"{Printed.Bare(part.Now[ValueNames.VentilatorDays]) ?? "not known:"} days, since {part.Times.OnDay(part.Now.Window.Episode.AirwaySecuredAt)}";
 
     private static string Size(PatientPicture now)
     {
         var patient = now.Window.Episode.Patient;
         var estimated = patient.HeightEstimated == true ? " (estimated)" : "";
         return patient.HeightCm is { } height
-            ? $"{Numbers.Typed(height, "cm")}{estimated}, PBW {Predicted(now)}"
+            ? $"{Printed.Typed(height, "cm")}{estimated}, PBW {Predicted(now)}"
             : $"height not recorded, PBW {Predicted(now)}";
     }
 
     private static string Predicted(PatientPicture now)
     {
         var weight = now[ValueNames.PredictedBodyWeightKg];
-        return Numbers.Bare(weight) is { } kilograms ? Numbers.WithUnit(kilograms, weight.Unit) : Numbers.Known(weight);
+        return Printed.Bare(weight) is { } kilograms ? Printed.WithUnit(kilograms, weight.Unit) : Printed.Known(weight);
     }
 
     private static string Context(PatientPicture now)

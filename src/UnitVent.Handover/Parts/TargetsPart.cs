@@ -27,18 +27,18 @@ internal static class TargetsPart
         Range("SpO2", set.SpO2LowPercent, set.SpO2HighPercent, "%"),
         Range("PaO2", set.PaO2LowMmHg, set.PaO2HighMmHg, "mmHg"),
         Range("PaCO2", set.PaCO2LowMmHg, set.PaCO2HighMmHg, "mmHg"),
-        set.PHFloor is { } floor ? $"pH not below {Numbers.AcidBase(floor)}" : null,
-        set.PHighLimitCmH2O is { } limit ? $"P high not above {Numbers.Typed(limit, "cmH2O")}" : null,
-        set.EndReleaseFlowPercent is { } percent ? $"end of release at {Numbers.Typed(percent, "% of peak")}" : null,
+        set.PHFloor is { } floor ? $"pH not below {Printed.AcidBase(floor)}" : null,
+        set.PHighLimitCmH2O is { } limit ? $"P high not above {Printed.Typed(limit, "cmH2O")}" : null,
+        set.EndReleaseFlowPercent is { } percent ? $"end of release at {Printed.Typed(percent, "% of peak")}" : null,
         Range("RASS", set.RassLow, set.RassHigh, ""),
-        set.MeanArterialPressureMmHg is { } pressure ? $"mean arterial pressure {Numbers.Typed(pressure, "mmHg")}" : null,
+        set.MeanArterialPressureMmHg is { } pressure ? $"mean arterial pressure {Printed.Typed(pressure, "mmHg")}" : null,
     ];
 
     private static string? Range(string name, decimal? low, decimal? high, string unit) => (low, high) switch
     {
-        ({ } from, { } to) => $"{name} {Numbers.Typed(from)} to {Numbers.Typed(to, unit)}",
-        ({ } from, null) => $"{name} not below {Numbers.Typed(from, unit)}",
-        (null, { } to) => $"{name} not above {Numbers.Typed(to, unit)}",
+        ({ } from, { } to) => $"{name} {Printed.Typed(from)} to {Printed.Typed(to, unit)}",
+        ({ } from, null) => $"{name} not below {Printed.Typed(from, unit)}",
+        (null, { } to) => $"{name} not above {Printed.Typed(to, unit)}",
         _ => null,
     };
 }

@@ -33,7 +33,7 @@ internal static class TrendPart
             new TrendStrip(Described(part, oxygen), span, Ticks(part, span), changes, lanes)])];
     }
 
-    private static string Last(PictureValue? value) => value is null ? "" : Numbers.Bare(value) ?? "";
+    private static string Last(PictureValue? value) => value is null ? "" : Printed.Bare(value) ?? "";
 
     /// <summary>The gases of the span; two that lie further apart than a gas holds are not joined.</summary>
     private static List<TrendPoint> Oxygen(PatientPicture now, Interval span)
@@ -77,6 +77,6 @@ internal static class TrendPart
             ? "No P/F within the last 48 hours; mean airway pressure from the settings as steps."
             : $"P/F from {Spoken(known[0])} to {Spoken(known[^1])}, {known.Count} gases; mean airway pressure from the settings as steps.";
 
-        string Spoken(PairedGas gas) => $"{Numbers.Bare(gas.Values[ValueNames.PfRatio])} at {part.Times.At(gas.Gas.At)}";
+        string Spoken(PairedGas gas) => $"{Printed.Bare(gas.Values[ValueNames.PfRatio])} at {part.Times.At(gas.Gas.At)}";
     }
 }

@@ -1,31 +1,22 @@
-using System.Globalization;
 using NodaTime;
 using NodaTime.Text;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Web.Shared;
 
 /// <summary>Numbers and times as screens write them.</summary>
 public static class Format
 {
-    public const string Minus = "\u2212";
-
     private static readonly LocalTimePattern Clock = LocalTimePattern.CreateWithInvariantCulture("HH:mm");
     private static readonly LocalDatePattern Day = LocalDatePattern.CreateWithInvariantCulture("ddd d MMM");
     private static readonly LocalDatePattern DayOfYear = LocalDatePattern.CreateWithInvariantCulture("ddd d MMM uuuu");
     private static readonly LocalDatePattern Date = LocalDatePattern.CreateWithInvariantCulture("d MMM uuuu");
 
-    /// <summary>A number with fixed decimals, a leading zero and the true minus sign: <c>−0.5</c>.</summary>
-    public static string Number(double value, int decimals)
-    {
-        var text = Math.Round(value, decimals, MidpointRounding.AwayFromZero).ToString("F" + decimals, CultureInfo.InvariantCulture);
-        return text.StartsWith('-') && text.AsSpan(1).ContainsAnyInRange('1', '9') ? Minus + text[1..] : text.TrimStart('-');
-    }
-
     /// <summary>A number with fixed decimals; an en dash when there is none.</summary>
-    public static string Number(double? value, int decimals) => value is { } known ? Number(known, decimals) : "–";
+    public static string Number(double? value, int decimals) => value is { } known ? Numbers.Fixed(known, decimals) : "–";
 
-    /// <summary>A number exactly as it was typed, with the true minus sign; an en dash when there is none.</summary>
-    public static string Typed(decimal? value) => value?.ToString(CultureInfo.InvariantCulture).Replace("-", Minus, StringComparison.Ordinal) ?? "–";
+    /// <summary>A number exactly as it was typed; an en dash when there is none.</summary>
+    public static string Typed(decimal? value) => value is { } known ? Numbers.Typed(known) : "–";
 
     /// <summary>The time of day in a zone, with the day when it is not today, and the year when it is not this year.</summary>
     public static string Time(Instant at, Instant now, DateTimeZone zone)

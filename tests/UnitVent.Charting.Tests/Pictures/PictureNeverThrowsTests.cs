@@ -29,6 +29,7 @@ public sealed class PictureNeverThrowsTests
                 var picture = chart.Picture();
                 Assert.All(picture.Values.Values, v => Assert.Equal(v.State is ValueState.Ok or ValueState.Validity, v.Value is not null));
                 Assert.All(picture.Values.Values.Where(v => v.State != ValueState.Ok), v => Assert.False(string.IsNullOrEmpty(v.Because)));
+                Assert.All(picture.Values.Values.Where(v => v.Kind != ValueKind.Measured), v => Assert.Equal(v.Value is null, v.Working is null));
             },
             iter: 2000);
 

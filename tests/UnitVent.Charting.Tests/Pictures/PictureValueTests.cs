@@ -215,10 +215,6 @@ public sealed class PictureValueTests
     }
 
     [Fact]
-    public void EveryValue_HasAnEquationInWords_OrIsRead() =>
-        Assert.All(Chart.Round().Picture().Values.Values.Where(v => v.Equation.Length > 0), v => Assert.NotNull(Equations.Behind(v.Name)));
-
-    [Fact]
     public void NextChange_OfAFreshRound_IsTheNextCheck() =>
         Assert.Equal(Chart.Ago(25) + Duration.FromHours(4) + Duration.FromSeconds(1), new Chart().With(Chart.Aprv(700), Chart.Gas(), Chart.Check()).Picture().NextChangeAt);
 }

@@ -2,6 +2,7 @@ using UnitVent.Charting.Pictures;
 using UnitVent.Charting.Rules.Oxygen;
 using UnitVent.Charting.Trends;
 using UnitVent.Charting.Windows;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Collapse;
 
@@ -80,9 +81,9 @@ public sealed class OxygenationWorseRule : Rule
         var desaturated = spO2Before - spO2?.Percent >= options.SpO2FallPoints;
         var level = low ? Severity.Urgent : twice || desaturated ? Severity.Caution : Severity.Advisory;
         var mean = Mean(latest);
-        var says = $"P/F {Wording.Number(step.Before)} → {Wording.Number(step.After)} in {Wording.Hours(step.Span)}"
-            + (mean is { } m ? $" at mean pressure {Wording.Number(m)}" : "")
-            + (desaturated ? $"; SpO2 {Wording.Number(spO2Before)} → {Wording.Number(spO2!.Value.Percent)} %" : "");
+        var says = $"P/F {Numbers.Fixed(step.Before)} → {Numbers.Fixed(step.After)} in {Times.Hours(step.Span)}"
+            + (mean is { } m ? $" at mean pressure {Numbers.Fixed(m)}" : "")
+            + (desaturated ? $"; SpO2 {Numbers.Fixed(spO2Before)} → {Numbers.Fixed(spO2!.Value.Percent)} %" : "");
         return Raise(
             level,
             says,

@@ -1,5 +1,6 @@
 using NodaTime;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Due;
 
@@ -38,7 +39,7 @@ public sealed class CheckDueRule : Rule
         var overdue = age >= interval * options.CautionIntervals;
         var raised = (RuleOutcome.Raised)Raise(
             overdue ? Severity.Caution : Severity.Advisory,
-            $"ventilator check was due {Wording.Clock(DueAt(picture), picture)}, last {(picture.Check is { } c ? Wording.Clock(c.At, picture) : "none")}",
+            $"ventilator check was due {Times.Clock(DueAt(picture), picture)}, last {(picture.Check is { } c ? Times.Clock(c.At, picture) : "none")}",
             "the ventilator check",
             DueAt(picture),
             Evidence.Of(age / interval, [], ("hoursSinceCheck", age.TotalHours)));

@@ -1,5 +1,6 @@
 using NodaTime;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Due;
 
@@ -33,11 +34,11 @@ public sealed class NotKnownRule : Rule
         var first = late[0];
         var overdue = late.Any(s => picture.AsOf - s.Seen > s.Limit * 2);
         var says = string.Join("; ", late.Select(s => s.Charted
-            ? $"{s.What} last seen {Wording.Clock(s.Seen, picture)}, {Wording.Hours(picture.AsOf - s.Seen)} ago"
-            : $"no {s.What} charted for {Wording.Hours(picture.AsOf - s.Seen)}"));
+            ? $"{s.What} last seen {Times.Clock(s.Seen, picture)}, {Times.Hours(picture.AsOf - s.Seen)} ago"
+            : $"no {s.What} charted for {Times.Hours(picture.AsOf - s.Seen)}"));
         var raised = (RuleOutcome.Raised)Raise(
             overdue ? Severity.Caution : Severity.Advisory,
-            "not known since " + Wording.Clock(first.Seen + first.Limit, picture) + ": " + says,
+            "not known since " + Times.Clock(first.Seen + first.Limit, picture) + ": " + says,
             "the patient, the ventilator, whether a gas was drawn and not charted",
             first.Seen + first.Limit,
             Evidence.Of(late.Max(s => (picture.AsOf - s.Seen) / s.Limit), [], [.. late.Select(s => (s.What, (picture.AsOf - s.Seen).TotalHours))]));

@@ -1,5 +1,6 @@
 using NodaTime;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Oxygen;
 
@@ -53,12 +54,12 @@ public sealed class LowOxygenRule : Rule
         var parts = new List<string>();
         if (bySpO2 is not null)
         {
-            parts.Add($"SpO2 {Wording.Number(spO2!.Value.Percent)} %, edge {Wording.Number(CautionEdge(picture) ?? UrgentEdge(picture, options))} %");
+            parts.Add($"SpO2 {Numbers.Fixed(spO2!.Value.Percent)} %, edge {Numbers.Fixed(CautionEdge(picture) ?? UrgentEdge(picture, options))} %");
         }
 
         if (byGas is not null)
         {
-            parts.Add($"PaO2 {Wording.Number(gas!.Value.MmHg)} mmHg, edge {Wording.Number(PaO2Edge(picture, options))} mmHg");
+            parts.Add($"PaO2 {Numbers.Fixed(gas!.Value.MmHg)} mmHg, edge {Numbers.Fixed(PaO2Edge(picture, options))} mmHg");
         }
 
         var level = bySpO2 > byGas || byGas is null ? bySpO2!.Value : byGas.Value;

@@ -1,5 +1,6 @@
 using UnitVent.Charting.Checking;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Slips;
 
@@ -41,7 +42,7 @@ public sealed class GasDoesNotFitRule : Rule
         var hint = standard is { } s && Math.Abs(s - (double)body.BicarbonateMmolL!) <= FitsStandardWithinMmolL ? "; it would fit standard bicarbonate" : "";
         return Raise(
             severity,
-            $"pH {body.PH} does not go with pCO2 {body.PCO2} and bicarbonate {body.BicarbonateMmolL}: pH {Wording.Number(fit.PH, 2)} would{hint}",
+            $"pH {body.PH} does not go with pCO2 {body.PCO2} and bicarbonate {body.BicarbonateMmolL}: pH {Numbers.Fixed(fit.PH, 2)} would{hint}",
             "the slip, the specimen, which bicarbonate it prints",
             gas.Gas.At,
             Evidence.Of(fit.BeyondRounding, [gas.Gas.Id], ("pHThatFits", fit.PH), ("deltaPH", fit.DeltaPH)));

@@ -1,5 +1,6 @@
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Sudden;
 
@@ -53,7 +54,7 @@ public sealed class SuddenChangeRule : Rule
         var says = $"SpO2 {b.SpO2Percent} → {a.SpO2Percent} %"
             + (pressure ? $", mean arterial pressure {b.MeanArterialPressureMmHg} → {a.MeanArterialPressureMmHg} mmHg" : "")
             + (volume is { } v ? $", volume {v.Before} → {v.After} mL" : "")
-            + $" between {Wording.Clock(before.At, picture)} and {Wording.Clock(after.At, picture)}";
+            + $" between {Times.Clock(before.At, picture)} and {Times.Clock(after.At, picture)}";
         return Raise(
             Severity.Urgent,
             says,

@@ -1,5 +1,6 @@
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Timing;
 
@@ -43,7 +44,7 @@ public sealed class ReleasedLongRule : Rule
         }
 
         var few = (check.Body.FlowReadings ?? check.Body.ReleasesAveraged ?? 1) < 2;
-        var says = $"release ended at {Wording.Number(percent)} % of peak, edge {Wording.Number(edges.Caution)} %{(few ? "; one release" : "")}";
+        var says = $"release ended at {Numbers.Fixed(percent)} % of peak, edge {Numbers.Fixed(edges.Caution)} %{(few ? "; one release" : "")}";
         return Raise(
             level.LoweredIf(few),
             says,

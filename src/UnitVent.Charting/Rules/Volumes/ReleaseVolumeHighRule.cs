@@ -1,4 +1,5 @@
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Wording;
 
 namespace UnitVent.Charting.Rules.Volumes;
 
@@ -47,8 +48,8 @@ public sealed class ReleaseVolumeHighRule : Rule
 
         var few = (check.Body.ReleasesAveraged ?? 1) < 2;
         var estimated = picture.Window.Episode.Patient.HeightEstimated == true;
-        var says = $"release {Wording.Number(perKg, 1)} mL/kg"
-            + (swing is { } s ? $", alveolar swing {Wording.Number(s)} cmH2O" : "")
+        var says = $"release {Numbers.Fixed(perKg, 1)} mL/kg"
+            + (swing is { } s ? $", alveolar swing {Numbers.Fixed(s)} cmH2O" : "")
             + (few ? "; one release" : "") + (estimated ? "; height estimated" : "");
         return Raise(
             level.LoweredIf(few).LoweredIf(estimated),
