@@ -12,7 +12,7 @@ public sealed record Step(double Before, double After, int Count, Duration Span)
     /// <summary>How far back the reference reaches [common practice].</summary>
     public static readonly Duration Reach = Duration.FromHours(12);
 
-    /// <summary>Gets the change relative to the reference: −0.20 is a fall by a fifth.</summary>
+    /// <summary>Gets the change relative to the reference, of a quantity above zero: −0.20 is a fall by a fifth.</summary>
     public double RelativeChange => (After - Before) / Before;
 
     /// <summary>The step of a value; null when no earlier value lies within reach.</summary>

@@ -31,6 +31,16 @@ public sealed class StepTests
     }
 
     [Fact]
+    public void SettingStep_OfTheSameMinute_BelongsToTheSettingsBefore()
+    {
+        SeriesPoint[] series = [At(600, 100), At(500, 180), At(300, 200), At(299, 150)];
+
+        var step = SettingStep.Of(series, Chart.Ago(300), Chart.Ago(600), Duration.Zero)!;
+
+        Assert.Equal((190, 150, 2), (step.Step.Before, step.Step.After, step.Step.Count));
+    }
+
+    [Fact]
     public void SettingStep_WithNothingSettledYet_IsNone() =>
         Assert.Null(SettingStep.Of([At(500, 180), At(290, 150)], Chart.Ago(300), null, Duration.FromMinutes(60)));
 
