@@ -66,5 +66,6 @@ public static class PatientSheet
             new Space(),
             new FillIn("Read back by the one who takes over; initials", ["Gave", "Took over", "Time"]),
         ]),
+        .. WorkingsPart.Of(part),
     ];
 }

@@ -1,7 +1,4 @@
 using BenchmarkDotNet.Attributes;
-using BenchmarkDotNet.Configs;
-using BenchmarkDotNet.Jobs;
-using BenchmarkDotNet.Toolchains.InProcess.Emit;
 using Microsoft.AspNetCore.Components;
 using Microsoft.AspNetCore.Components.Web;
 using Microsoft.EntityFrameworkCore;
@@ -81,10 +78,5 @@ public class BoardBenchmarks
             });
             return (await renderer.RenderComponentAsync<BoardTable>(parameters)).ToHtmlString().Length;
         });
-    }
-
-    private sealed class InThisProcess : ManualConfig
-    {
-        public InThisProcess() => AddJob(Job.Default.WithToolchain(InProcessEmitToolchain.Instance).WithWarmupCount(5).WithIterationCount(15));
     }
 }

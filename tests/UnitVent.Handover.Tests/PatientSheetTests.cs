@@ -1,3 +1,4 @@
+using System.Text.RegularExpressions;
 using NodaTime;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Flags;
@@ -138,6 +139,17 @@ public sealed class PatientSheetTests
         Assert.Contains($"{now[ValueNames.EndReleaseFlowPercent].Value:0} %", text);
         Assert.Contains($"Time constant, estimate {now[ValueNames.ExpiratoryTimeConstantS].Value:0.##} s", text);
         Assert.Contains($"Own share of ventilation {now[ValueNames.SpontaneousSharePercent].Value:0} %", text);
+    }
+
+    [Fact]
+    public void Workings_WhereThePageHasRoom_AreThoseOfTheScreen()
+    {
+        var roomy = ExampleChart.Input(ExampleChart.Window([.. ExampleChart.Entries().Where(e => e is SettingChange or VentilatorCheck)]));
+
+        var text = Regex.Replace(Print(roomy).Text, @"\s+", " ");
+
+        Assert.Contains("How the numbers were made", text);
+        Assert.Contains(roomy.Now[ValueNames.ExpiratoryTimeConstantS].Working!, text);
     }
 
     [Fact]

@@ -40,6 +40,11 @@ internal sealed class Paginator(double pageHeight)
     {
         if (used > 0 && used + HeightOf(chain) > pageHeight)
         {
+            if (chain[0].IsDispensable)
+            {
+                return;
+            }
+
             NextPage();
         }
 

@@ -11,6 +11,9 @@ internal sealed record Piece(double Height, Action<Canvas, XPoint> Draw)
     /// <summary>Gets whether this is white space, which is dropped at the top of a page.</summary>
     public bool IsSpace { get; init; }
 
+    /// <summary>Gets whether this is left out, with what it is kept with, where it would begin another page.</summary>
+    public bool IsDispensable { get; init; }
+
     /// <summary>Gets the head that is drawn again when a page begins with this piece.</summary>
     public Piece? RepeatedHead { get; init; }
 
