@@ -4,7 +4,7 @@ namespace UnitVent.Physiology;
 /// <remarks><para>Solves the time-weighted mean of the two levels (<see cref="MeanAirwayPressure.Aprv"/>) for one of its terms. The
 /// mean lies close to P high, so that only the first 1–2 cmH2O can be traded at all.</para>
 /// <para>Source: the definition of the mean; the limits of <see cref="IsWithinLimits"/> are common practice. Every trade towards a
-/// longer T high costs releases, hence carbon dioxide clearance, of which this says nothing (<see cref="SettingChange"/>).</para></remarks>
+/// longer T high costs releases, hence carbon dioxide clearance, of which this says nothing (<see cref="AprvProjection"/>).</para></remarks>
 public static class MeanPressureTrade
 {
     private const double LongestCycleSeconds = 12; // 5 releases a minute

@@ -5,7 +5,7 @@ using static UnitVent.Physiology.Tests.Given;
 namespace UnitVent.Physiology.Tests;
 
 /// <summary>Worked from the one-compartment model, as in Burke WC, et al. J Appl Physiol 1993;74:922-933.</summary>
-public sealed class SettingChangeTests
+public sealed class AprvProjectionTests
 {
     /// <summary>28/0 cmH2O, 4.5/0.5 s, ratio 0.60, 420 mL, PaCO2 50, dead space 150 mL, own 2.0 L/min at 10/min.</summary>
     private static readonly ReleaseReading Base = new(
@@ -138,7 +138,7 @@ public sealed class SettingChangeTests
     [Theory, MemberData(nameof(Refusals))]
     public void Project_BeyondALimit_GivesEveryReason(ReleaseReading present, AprvSettings planned, ProjectionRefusal[] expected, string reason)
     {
-        var answer = SettingChange.Project(present, planned);
+        var answer = AprvProjection.Project(present, planned);
 
         Assert.True(answer.Change is null, reason);
         Assert.Equal(expected, answer.Refusals);
@@ -146,7 +146,7 @@ public sealed class SettingChangeTests
 
     [Theory, MemberData(nameof(Accepted))]
     public void Project_JustInsideALimit_GivesAnAnswer(ReleaseReading present, AprvSettings planned, string reason)
-        => Assert.True(SettingChange.Project(present, planned) is { Change: not null, Refusals.Count: 0 }, reason);
+        => Assert.True(AprvProjection.Project(present, planned) is { Change: not null, Refusals.Count: 0 }, reason);
 
     /// <summary>The first state of <see cref="IncompleteRefillingTests"/>, 351.5 mL at 30 mL/cmH2O and tau 1 s, with T high halved.</summary>
     [Fact]
@@ -177,7 +177,7 @@ public sealed class SettingChangeTests
     public void NoChange_OfAnyReading_LeavesEverythingAsItIs()
         => Readings.Sample(reading =>
         {
-            var answer = SettingChange.Project(reading, reading.Settings);
+            var answer = AprvProjection.Project(reading, reading.Settings);
             return answer.Change is not { } change
                 || (Near(change.PaCO2.Expected.MmHg, reading.PaCO2.MmHg)
                     && Near(change.PaCO2.Lowest.MmHg, reading.PaCO2.MmHg)
@@ -188,7 +188,7 @@ public sealed class SettingChangeTests
 
     [Fact]
     public void LongerTimeHigh_OfAnyReading_LowersRateAndRaisesMeanPressure()
-        => Readings.Sample(reading => SettingChange.Project(reading, reading.Settings with { TimeHigh = Seconds(reading.Settings.TimeHigh.Seconds + 0.5) })
+        => Readings.Sample(reading => AprvProjection.Project(reading, reading.Settings with { TimeHigh = Seconds(reading.Settings.TimeHigh.Seconds + 0.5) })
             .Change is not { } change
             || (change.Planned.Rate.PerMinute < change.Present.Rate.PerMinute
                 && change.Planned.MeanPressure.CmH2O > change.Present.MeanPressure.CmH2O
@@ -198,7 +198,7 @@ public sealed class SettingChangeTests
     public void Answer_OfAnyReading_StaysInsideItsLimits()
         => Gen.Select(Readings, Readings).Sample((reading, other) =>
         {
-            var (change, refusals) = (SettingChange.Project(reading, other.Settings).Change, SettingChange.Project(reading, other.Settings).Refusals);
+            var (change, refusals) = (AprvProjection.Project(reading, other.Settings).Change, AprvProjection.Project(reading, other.Settings).Refusals);
             return change is null
                 ? refusals.Count > 0 && refusals.SequenceEqual(refusals.Distinct().Order())
                 : change.PaCO2.Lowest.MmHg >= 15 && change.PaCO2.Highest.MmHg <= 150
@@ -209,12 +209,12 @@ public sealed class SettingChangeTests
     [Fact]
     public void Project_WithoutAReading_Refuses()
     {
-        Assert.Throws<ArgumentNullException>(() => SettingChange.Project(null!, Base.Settings));
-        Expect.Refused(() => SettingChange.Project(Base with { Volume = default }, Base.Settings));
-        Expect.Refused(() => SettingChange.Project(Base with { PaCO2 = default }, Base.Settings));
-        Expect.Refused(() => SettingChange.Project(Base with { Settings = Planned(high: 0) }, Base.Settings));
-        Expect.Refused(() => SettingChange.Project(Base, Planned(low: 28)));
-        Expect.Refused(() => SettingChange.Project(Base, Planned(timeHigh: 0)));
+        Assert.Throws<ArgumentNullException>(() => AprvProjection.Project(null!, Base.Settings));
+        Expect.Refused(() => AprvProjection.Project(Base with { Volume = default }, Base.Settings));
+        Expect.Refused(() => AprvProjection.Project(Base with { PaCO2 = default }, Base.Settings));
+        Expect.Refused(() => AprvProjection.Project(Base with { Settings = Planned(high: 0) }, Base.Settings));
+        Expect.Refused(() => AprvProjection.Project(Base, Planned(low: 28)));
+        Expect.Refused(() => AprvProjection.Project(Base, Planned(timeHigh: 0)));
     }
 
     private static Gen<ReleaseReading> Readings => Gen.Select(
@@ -243,7 +243,7 @@ public sealed class SettingChangeTests
 
     private static ProjectedChange Projected(ReleaseReading present, AprvSettings planned)
     {
-        var answer = SettingChange.Project(present, planned);
+        var answer = AprvProjection.Project(present, planned);
         Assert.Empty(answer.Refusals);
         return Assert.IsType<ProjectedChange>(answer.Change);
     }

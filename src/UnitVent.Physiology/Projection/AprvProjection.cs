@@ -12,7 +12,7 @@ namespace UnitVent.Physiology;
 /// gas; these are for the caller to know.</para>
 /// <para>Source: one-compartment model, Burke WC, et al. J Appl Physiol 1993;74:922-933; PaCO2 inversely as alveolar ventilation is
 /// standard physiology; the limits that refuse are common practice.</para></remarks>
-public static class SettingChange
+public static class AprvProjection
 {
     private const double LowestRatio = 0.05;
     private const double HighestRatio = 0.90;
