@@ -29,6 +29,10 @@ public sealed class EquationConventionTests
         [typeof(Bicarbonate)] = Range(0, 100, Bicarbonate.FromMmolPerLitre),
         [typeof(BloodPH)] = Range(6, 8.5, BloodPH.FromPH),
         [typeof(BarometricPressure)] = Range(200, 900, BarometricPressure.FromMmHg),
+        [typeof(TimeSpan)] = Range(0, 30, x => TimeSpan.FromDays(x)),
+        [typeof(TimeSpan?)] = Range(0, 40, x => TimeSpan.FromDays(x)).Select(Gen.Bool, (x, known) => known ? x : null!),
+        [typeof(IReadOnlyList<VentilatedSpell>)] = Gen.Double[0, 20].Array[0, 3].Select(days => (object)days
+            .Select((day, i) => new VentilatedSpell(TimeSpan.FromDays(i * day), TimeSpan.FromDays((i * day) + day))).ToArray()),
     };
 
     private static readonly Assembly Physiology = typeof(AirwayPressure).Assembly;

@@ -1,6 +1,6 @@
 namespace UnitVent.Physiology;
 
-/// <summary>The sex used for the lung-size formula. It says nothing else about the person.</summary>
+/// <summary>The sex used for the formulas of body size, above all that of lung size. It says nothing else about the person.</summary>
 public enum LungSizeSex
 {
     /// <summary>The formula's constant for women.</summary>

@@ -32,6 +32,25 @@ public static class OxygenDissociation
         return PartialPressure.FromMmHg(larger - (50 / larger)); // (B + A)(B − A) = 50³, so the second root is 50 over the first
     }
 
+    /// <summary>Computes the oxygen tension at a saturation by the published approximation, for comparison with other work.</summary>
+    /// <remarks><para>ln P = 0.385 ln[S / (1 − S)] + 3.32 − 1/(72 S) − S⁶/6, P in mmHg; up to 1 mmHg from
+    /// <see cref="PartialPressureFor"/> between 50 and 95 %, and no inverse of anything here.</para>
+    /// <para>Source: Severinghaus JW. J Appl Physiol 1979;46:599-602, equation 2.</para></remarks>
+    /// <exception cref="ArgumentOutOfRangeException">As for <see cref="PartialPressureFor"/>.</exception>
+    public static PartialPressure ApproximatePartialPressureFor(Saturation saturation)
+    {
+        var s = Guard.InRange(saturation.Fraction, Guard.JustAboveZero, Guard.JustBelowOne, nameof(saturation));
+        return PartialPressure.FromMmHg(Math.Exp((0.385 * Math.Log(s / (1 - s))) + 3.32 - (1 / (72 * s)) - (Math.Pow(s, 6) / 6)));
+    }
+
+    /// <summary>Computes d ln PO2 / dT of blood cooled or warmed without loss of gas, per °C.</summary>
+    /// <remarks>0.058 / [0.243 (P/100)^3.88 + 1] + 0.013. Source: Severinghaus JW. J Appl Physiol 1979;46:599-602.</remarks>
+    public static double TensionRisePerDegree(PartialPressure pO2) => (0.058 / ((0.243 * Math.Pow(pO2.MmHg / 100, 3.88)) + 1)) + 0.013;
+
+    /// <summary>Computes d ln PO2 / d pH at constant saturation: −1.4 at 10 mmHg, −0.9 at 100 mmHg.</summary>
+    /// <remarks>(P / 26.6)^0.184 − 2.2. Source: Severinghaus JW. J Appl Physiol 1979;46:599-602.</remarks>
+    public static double TensionRisePerPH(PartialPressure pO2) => Math.Pow(pO2.MmHg / 26.6, 0.184) - 2.2;
+
     /// <summary>Computes the tension that has, on the standard curve, the saturation <paramref name="pO2"/> has under these conditions.</summary>
     /// <remarks><para>P × 10^[0.024 (37 − T) + 0.40 (pH − 7.40) + 0.06 (log 40 − log PCO2)].</para>
     /// <para>Source: Kelman GR. J Appl Physiol 1966;21:1375-1376.</para></remarks>

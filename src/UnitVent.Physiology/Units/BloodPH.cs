@@ -1,6 +1,6 @@
 namespace UnitVent.Physiology;
 
-/// <summary>The pH of blood at 37 °C.</summary>
+/// <summary>The pH of blood, at 37 °C unless an equation names another temperature.</summary>
 /// <remarks>A number without unit. The default value is 0, which no factory produces; equations refuse it.</remarks>
 public readonly record struct BloodPH
 {

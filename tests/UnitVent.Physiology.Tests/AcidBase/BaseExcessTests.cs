@@ -1,3 +1,4 @@
+using CsCheck;
 using static UnitVent.Physiology.Tests.Given;
 
 namespace UnitVent.Physiology.Tests;
@@ -14,7 +15,8 @@ public sealed class BaseExcessTests
         { 7.10, 80, 9, -5.85, -5.38, 19.57 },
     };
 
-    /// <summary>The same gases by other forms: BE(B) of Lang W, Zander R. Clin Chem Lab Med 2002;40:404-410, and a van Slyke SBE from memory.</summary>
+    /// <summary>The same gases worked by other forms: Lang W, Zander R. Clin Chem Lab Med 2002;40:404-410 at full saturation, and
+    /// Siggaard-Andersen O. Scand J Clin Lab Invest Suppl 1977;146:15-20 (from memory).</summary>
     public static TheoryData<double, double, double, double, double> PublishedOtherForms => new()
     {
         { 7.40, 40, 15, 0.00, -0.17 },
@@ -36,10 +38,12 @@ public sealed class BaseExcessTests
     }
 
     [Theory, MemberData(nameof(PublishedOtherForms))]
-    public void BaseExcess_BesideOtherPublishedForms_DiffersByLessThanTwo(double pH, double pCO2, double hb, double zander, double vanSlyke)
+    public void BaseExcess_ByOtherPublishedForms_IsAsPublishedAndDiffersByLessThanTwo(double pH, double pCO2, double hb, double zander, double vanSlyke)
     {
         var bicarbonate = HendersonHasselbalch.Bicarbonate(Ph(pH), MmHg(pCO2));
 
+        Assert.Equal(zander, BaseExcess.Zander(Ph(pH), MmHg(pCO2), GPerDl(hb), SatPercent(100)), 0.0051);
+        Assert.Equal(vanSlyke, BaseExcess.StandardVanSlyke(Ph(pH), bicarbonate), 0.0051);
         Assert.Equal(zander, BaseExcess.Blood(Ph(pH), bicarbonate, GPerDl(hb)), 2.0);
         Assert.Equal(vanSlyke, BaseExcess.Standard(Ph(pH), bicarbonate), 2.0);
     }
@@ -61,6 +65,25 @@ public sealed class BaseExcessTests
         Assert.Equal(975.2, BaseExcess.Standard(Ph(7.4), 1000), 1e-9);
     }
 
+    /// <summary>Lang and Zander: each g/dL of haemoglobin that carries no oxygen takes up 0.2 mmol/L.</summary>
+    [Fact]
+    public void Zander_OfBloodWithoutOxygen_IsLowerByItsHaemoglobin()
+        => Assert.Equal(-0.2 * 15 * 0.25, Zander(75) - Zander(100), 1e-9);
+
+    [Fact]
+    public void Zander_WithoutAnInput_Refuses()
+    {
+        Expect.Refused(() => BaseExcess.Zander(default, MmHg(40), GPerDl(15), SatPercent(97)));
+        Expect.Refused(() => BaseExcess.Zander(Ph(7.4), default, GPerDl(15), SatPercent(97)));
+        Expect.Refused(() => BaseExcess.StandardVanSlyke(default, 24));
+        Expect.Refused(() => BaseExcess.StandardVanSlyke(Ph(7.4), double.NaN));
+    }
+
+    [Fact]
+    public void BaseExcess_OfARisingPCO2AtOnePH_Rises()
+        => Gen.Select(Gen.Double[6.9, 7.7], Gen.Double[10, 100], Gen.Double[1, 20]).Sample((pH, pCO2, more) =>
+            BaseExcess.Zander(Ph(pH), MmHg(pCO2 + more), GPerDl(10), SatPercent(97)) > BaseExcess.Zander(Ph(pH), MmHg(pCO2), GPerDl(10), SatPercent(97)));
+
     [Fact]
     public void BaseExcess_WithoutPH_Refuses() => Expect.Refused(() => BaseExcess.Standard(default, 24));
 
@@ -74,4 +97,6 @@ public sealed class BaseExcessTests
     [Fact]
     public void StandardBicarbonate_OfBloodInBalance_IsTheReference()
         => Assert.Equal(24.47, StandardBicarbonate.Compute(0, GPerDl(15), SatPercent(100)), 1e-9);
+
+    private static double Zander(double percent) => BaseExcess.Zander(Ph(7.25), MmHg(60), GPerDl(15), SatPercent(percent));
 }

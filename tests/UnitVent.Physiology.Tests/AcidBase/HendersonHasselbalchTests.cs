@@ -27,18 +27,6 @@ public sealed class HendersonHasselbalchTests
         { 16, 20, 7.5, 7.521 },
     };
 
-    /// <summary>pH and hydrogen ion concentration in nmol/L as commonly tabled (common practice).</summary>
-    public static TheoryData<double, double> PublishedHydrogenTable => new()
-    {
-        { 7.00, 100 },
-        { 7.10, 79 },
-        { 7.20, 63 },
-        { 7.30, 50 },
-        { 7.40, 40 },
-        { 7.50, 32 },
-        { 7.60, 25 },
-    };
-
     /// <summary>Worked with the CLSI C46 constants: pH, PCO2, HCO3 as typed, and how far the computed pH is off.</summary>
     public static TheoryData<double, double, double, double, string> PublishedConsistency => new()
     {
@@ -66,10 +54,6 @@ public sealed class HendersonHasselbalchTests
         Assert.Equal(published, actual, 0.025);
         Assert.Equal(ours, actual, 0.00051);
     }
-
-    [Theory, MemberData(nameof(PublishedHydrogenTable))]
-    public void PH_OfTheBicarbonateThatGivesATabledHydrogenIon_IsTheTabledPH(double pH, double hydrogen)
-        => Assert.Equal(pH, HendersonHasselbalch.PH(MmolPerL(24 * 40 / hydrogen), MmHg(40)), 0.01);
 
     [Theory, MemberData(nameof(PublishedConsistency))]
     public void ConsistencyDeltaPH_OfPublishedGas_IsThePublishedDifference(double pH, double pCO2, double bicarbonate, double expected, string reason)

@@ -32,17 +32,42 @@ public sealed class MechanicalPowerTests
         => Assert.Equal(expected, MechanicalPower.VolumeControlled(PerMin(rate), Ml(litres * 1000), CmH2O(peak), CmH2O(driving)), 0.0051);
 
     [Theory, MemberData(nameof(PublishedLongForm))]
-    public void VolumeControlled_OnTheBreathTheLongFormDescribes_ReturnsItsPower(
+    public void FromMechanics_OnPublishedBreath_ReturnsPublishedPowerAndThatOfTheShortForm(
         double rate, double litres, double elastance, double ratio, double resistance, double peep, double expected)
     {
         var inspiratorySeconds = 60 / rate * ratio / (1 + ratio);
         var driving = elastance * litres;
         var peak = peep + driving + (resistance * litres / inspiratorySeconds);
+        var mechanics = MechanicalPower.FromMechanics(
+            PerMin(rate), Ml(litres * 1000), MlPerCmH2O(1000 / elastance), ratio, CmH2OSPerL(resistance), CmH2O(peep));
 
+        Assert.Equal(expected, mechanics, 0.0051);
         Assert.Equal(expected, MechanicalPower.VolumeControlled(PerMin(rate), Ml(litres * 1000), CmH2O(peak), CmH2O(driving)), 0.0051);
     }
 
     [Theory, MemberData(nameof(PublishedPressureControlled))]
     public void PressureControlled_OnPublishedBreath_ReturnsPublishedPower(double rate, double litres, double above, double peep, double expected)
         => Assert.Equal(expected, MechanicalPower.PressureControlled(PerMin(rate), Ml(litres * 1000), CmH2O(above), CmH2O(peep)), 0.0051);
+
+    /// <summary>Worked from Giosa L, et al. Intensive Care Med Exp 2019;7:61: L/min, peak, PEEP, flow L/min, J/min.</summary>
+    [Theory]
+    [InlineData(8.4, 30, 12, 40, 20.44)]
+    [InlineData(7.5, 25, 5, 45, 14.06)]
+    public void WithoutHold_OnPublishedBreath_ReturnsPublishedPower(double litresPerMinute, double peak, double peep, double flow, double expected)
+        => Assert.Equal(expected, MechanicalPower.WithoutHold(LMin(litresPerMinute), CmH2O(peak), CmH2O(peep), FlowLMin(flow)), 0.0051);
+
+    [Theory]
+    [InlineData(0.05, true)]
+    [InlineData(20, true)]
+    [InlineData(0.049, false)]
+    [InlineData(20.01, false)]
+    [InlineData(double.NaN, false)]
+    public void FromMechanics_AroundTheLimitsOfTheTimeRatio_RefusesOutside(double ratio, bool expected)
+        => Assert.Equal(expected, Record.Exception(() => (object)Long(MlPerCmH2O(30), ratio)) is null);
+
+    [Fact]
+    public void FromMechanics_WithoutCompliance_Refuses() => Expect.Refused(() => Long(default, 0.5));
+
+    private static double Long(Compliance compliance, double ratio)
+        => MechanicalPower.FromMechanics(PerMin(20), Ml(420), compliance, ratio, CmH2OSPerL(10), CmH2O(12));
 }

@@ -57,12 +57,12 @@ public sealed class OxygenDissociationTests
         => Assert.Equal(percent, OxygenDissociation.Saturation(MmHg(mmHg)).Percent, 0.0051);
 
     [Theory, MemberData(nameof(PublishedInverse))]
-    public void PartialPressureFor_PublishedSaturation_IsExactAndNearEquation2(double percent, double exact, double equation2)
+    public void PartialPressureFor_PublishedSaturation_IsThatOfEachEquation(double percent, double exact, double equation2)
     {
         var actual = OxygenDissociation.PartialPressureFor(SatPercent(percent)).MmHg;
 
         Assert.Equal(exact, actual, 0.0051);
-        Assert.Equal(equation2, actual, 0.8);
+        Assert.Equal(equation2, OxygenDissociation.ApproximatePartialPressureFor(SatPercent(percent)).MmHg, 0.0051);
     }
 
     [Theory, MemberData(nameof(PublishedVirtualTensions))]
@@ -79,6 +79,37 @@ public sealed class OxygenDissociationTests
     public void PartialPressureFor_TheSaturationOfATension_ReturnsTheTension()
         => Gen.Double[0.1, 700].Sample(p =>
             Math.Abs(OxygenDissociation.PartialPressureFor(OxygenDissociation.Saturation(MmHg(p))).MmHg - p) <= 1e-6 * p);
+
+    [Fact]
+    public void ApproximatePartialPressureFor_BetweenHalfAnd95Percent_IsWithinOneOfTheExact()
+        => Gen.Double[50, 95].Sample(percent => Math.Abs(
+            OxygenDissociation.ApproximatePartialPressureFor(SatPercent(percent)).MmHg
+            - OxygenDissociation.PartialPressureFor(SatPercent(percent)).MmHg) < 1);
+
+    [Theory]
+    [InlineData(0)]
+    [InlineData(100)]
+    [InlineData(99.9999)]
+    public void ApproximatePartialPressureFor_AnEndOfTheCurve_Refuses(double percent)
+        => Expect.Refused(() => OxygenDissociation.ApproximatePartialPressureFor(SatPercent(percent)));
+
+    /// <summary>Worked from Severinghaus JW. J Appl Physiol 1979;46:599-602: PO2, d ln PO2 / dT, d ln PO2 / d pH.</summary>
+    [Theory]
+    [InlineData(0, 0.071, -2.2)]
+    [InlineData(26.6, 0.0709, -1.2)]
+    [InlineData(100, 0.0597, -0.924)]
+    [InlineData(300, 0.0162, -0.638)]
+    public void Coefficients_AtWorkedTensions_FollowTheEquations(double pO2, double perDegree, double perPH)
+    {
+        Assert.Equal(perDegree, OxygenDissociation.TensionRisePerDegree(MmHg(pO2)), 0.000051);
+        Assert.Equal(perPH, OxygenDissociation.TensionRisePerPH(MmHg(pO2)), 0.00051);
+    }
+
+    /// <summary>The temperature term of CLSI C46 is the same relation in powers of ten.</summary>
+    [Fact]
+    public void TensionRisePerDegree_OfAnyTension_IsThatOfTheTemperatureCorrection()
+        => Gen.Double[1, 500].Sample(pO2 => Math.Abs(
+            (Math.Log(TemperatureCorrection.PO2(MmHg(pO2), 38).MmHg / pO2) / OxygenDissociation.TensionRisePerDegree(MmHg(pO2))) - 1) < 0.01);
 
     [Fact]
     public void Saturation_OfARisingTension_NeverFalls()

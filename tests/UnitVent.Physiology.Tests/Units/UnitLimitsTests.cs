@@ -77,7 +77,7 @@ public sealed class UnitLimitsTests
         var factories = typeof(AirwayPressure).Assembly.GetExportedTypes()
             .Where(type => type.IsValueType && !type.IsEnum && type != typeof(SpontaneousShare))
             .SelectMany(type => type.GetMethods().Where(method => method.IsStatic && method.Name.StartsWith("From", StringComparison.Ordinal)))
-            .Where(method => method.Name != nameof(BarometricPressure.FromAltitude));
+            .Where(method => !method.Name.EndsWith("Altitude", StringComparison.Ordinal));
 
         Assert.Equal(Factories.Count, factories.Count());
         Assert.Equal(Factories.Keys.Order(), Limits.Select(row => row.Data.Item1).Order());
