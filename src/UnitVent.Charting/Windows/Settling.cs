@@ -9,6 +9,8 @@ internal static class Settling
     private static readonly Duration AfterOxygenFraction = Duration.FromMinutes(10);
     private static readonly Duration AfterPressureLowered = Duration.FromMinutes(5);
     private static readonly Duration AfterPressureRaised = Duration.FromMinutes(60);
+    private static readonly Duration AfterVentilationRaised = Duration.FromMinutes(30);
+    private static readonly Duration AfterVentilationLowered = Duration.FromMinutes(60);
 
     /// <summary>The settling time of oxygen after a change, against the settings before it; none when there were none.</summary>
     public static Duration OfOxygen(ChartWindow window, Charted<SettingChange> change)
@@ -24,6 +26,21 @@ internal static class Settling
             : pressure < 0 ? AfterPressureLowered
             : Duration.Zero;
     }
+
+    /// <summary>The settling time of carbon dioxide after a change, against the settings before it: shorter after ventilation was raised.</summary>
+    public static Duration OfCarbonDioxide(ChartWindow window, Charted<SettingChange> change) =>
+        window.Latest<SettingChange>(EntryKind.SettingChange, change.At - Duration.Epsilon) is not { } before ? Duration.Zero
+        : Drive(change.Body) > Drive(before.Body) ? AfterVentilationRaised
+        : AfterVentilationLowered;
+
+    /// <summary>What sets the machine's ventilation, comparable within a mode: pressure step or volume times breaths a minute.</summary>
+    private static decimal Drive(SettingChange s) => s.Mode switch
+    {
+        VentilationMode.Aprv => (s.PHighCmH2O - s.PLowCmH2O) / (s.THighS + s.TLowS) ?? 0,
+        VentilationMode.VolumeControl => s.SetRatePerMin * s.TidalVolumeMl ?? 0,
+        VentilationMode.PressureControl => s.SetRatePerMin * s.InspiratoryPressureAbovePeepCmH2O ?? 0,
+        _ => s.PressureSupportCmH2O ?? 0,
+    };
 
     private static decimal Pressure(SettingChange settings) =>
         (settings.PHighCmH2O ?? 0) + (settings.PeepCmH2O ?? 0) + (settings.InspiratoryPressureAbovePeepCmH2O ?? 0) + (settings.PressureSupportCmH2O ?? 0);

@@ -1,4 +1,6 @@
 using NodaTime;
+using UnitVent.Charting.Fields;
+using UnitVent.Charting.Projections;
 using UnitVent.Charting.Results;
 using UnitVent.Charting.Timelines;
 using UnitVent.Store.Reading;
@@ -13,6 +15,8 @@ public static class PictureEndpoints
     public static void MapPictures(this IEndpointRouteBuilder api)
     {
         api.MapGet("/episodes/{id:guid}/picture", PictureAsync).Produces<PictureBody>().WithSummary("Everything computed now, or at the instant given as `at`");
+        api.MapPost("/episodes/{id:guid}/projection", ProjectionAsync).Accepts<ProposedSettings>("application/json").Produces<Projection>()
+            .WithSummary("What follows from APRV settings that are considered; what is left out stays. Nothing is written");
         api.MapGet("/episodes/{id:guid}/timeline", TimelineAsync).Produces<Timeline>().WithSummary("The series behind the lanes, `from`–`to`; the last 24 h when not given");
     }
 
@@ -32,6 +36,20 @@ public static class PictureEndpoints
 
         var chart = await charts.PatientAsync(http.Actor(), id, at, cancel);
         return chart.Succeeded ? TypedResults.Ok(PictureBody.Of(chart.Value)) : Problems.Of(chart);
+    }
+
+    private static async Task<IResult> ProjectionAsync(Guid id, HttpContext http, ChartReader charts, CancellationToken cancel)
+    {
+        var json = await SentReader.JsonAsync(http.Request);
+        var read = json.Succeeded ? FieldReader.Read(typeof(ProposedSettings), json.Value) : json.As<object>();
+        if (!read.Succeeded)
+        {
+            return Problems.Of(read);
+        }
+
+        var chart = await charts.PatientAsync(http.Actor(), id, null, cancel);
+        var projection = chart.Succeeded ? Projector.Of(chart.Value.Picture, (ProposedSettings)read.Value) : chart.As<Projection>();
+        return projection.Succeeded ? TypedResults.Ok(projection.Value) : Problems.Of(projection);
     }
 
     private static async Task<IResult> TimelineAsync(Guid id, HttpContext http, ChartReader charts, IClock clock, CancellationToken cancel)

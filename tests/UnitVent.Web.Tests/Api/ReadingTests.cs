@@ -32,6 +32,27 @@ public sealed class ReadingTests(RunningApp app)
     }
 
     [Fact]
+    public async Task Value_SaysHowItWasMade()
+    {
+        var (caller, episode) = await ChartedAsync();
+        var mean = (await caller.GetAsync(episode + "/picture")).Json.GetProperty("values").GetProperty("meanAirwayPressureComputed");
+        Assert.Equal("(28 × 4.5 + 5 × 0.5) ÷ (4.5 + 0.5) → 25.7 cmH2O", mean.GetProperty("working").GetString());
+    }
+
+    [Fact]
+    public async Task Projection_TellsWhatFollows_OrWhyNot_AndRefusesWhatCannotBeSet()
+    {
+        var (caller, episode) = await ChartedAsync();
+        var projection = (await caller.PostAsync(episode + "/projection", new JsonObject { ["pHighCmH2O"] = 26 })).Json;
+        Assert.Equal((26 * 4.5 + 5 * 0.5) / 5.0, projection.GetProperty("then").GetProperty("meanAirwayPressureCmH2O").GetDouble(), 6);
+        Assert.Equal(JsonValueKind.Null, projection.GetProperty("paCO2").ValueKind);
+        Assert.NotEmpty(projection.GetProperty("refusals").EnumerateArray());
+        var refused = await caller.PostAsync(episode + "/projection", new JsonObject { ["pHighCmH2O"] = 99 });
+        Assert.Equal((HttpStatusCode.UnprocessableEntity, "pHighCmH2O"), (refused.Status, refused.Fields.Single()));
+        Assert.Equal(HttpStatusCode.BadRequest, (await caller.PostAsync(episode + "/projection", new JsonObject { ["fiO2"] = 0.5 })).Status);
+    }
+
+    [Fact]
     public async Task Picture_OfThePast_KnowsNothingLater()
     {
         var (caller, episode) = await ChartedAsync();
