@@ -34,7 +34,8 @@ public static class AprvProjection
         ArgumentOutOfRangeException.ThrowIfEqual(present.Volume, default, nameof(present));
         ArgumentOutOfRangeException.ThrowIfEqual(present.PaCO2, default, nameof(present));
 
-        if (SizeRefusals(present, planned).ToList() is { Count: > 0 } refusals)
+        var refusals = SizeRefusals(present, planned).ToList();
+        if (refusals.Count > 0)
         {
             return new(refusals);
         }
@@ -77,7 +78,8 @@ public static class AprvProjection
         var balance = new CarbonDioxideBalance(present, planned, volume, 1);
         var smaller = new CarbonDioxideBalance(present, planned, volume, SmallerDeadSpace);
         var larger = new CarbonDioxideBalance(present, planned, volume, LargerDeadSpace);
-        if (balance.Refusals().ToList() is { Count: > 0 } refusals)
+        var refusals = balance.Refusals().ToList();
+        if (refusals.Count > 0)
         {
             return new(refusals);
         }

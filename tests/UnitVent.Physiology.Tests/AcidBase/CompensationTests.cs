@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using CsCheck;
 using static UnitVent.Physiology.RespiratoryOnset;
 using static UnitVent.Physiology.Tests.Given;
@@ -82,6 +83,10 @@ public sealed class CompensationTests
         Expect.Refused(() => Compensation.PCO2InMetabolicAlkalosis(default));
         Expect.Refused(() => Compensation.BicarbonateInRespiratory(default, Acute));
     }
+
+    [Fact]
+    public void BicarbonateInRespiratory_OfAnOnsetThatDoesNotExist_Throws()
+        => Assert.Throws<SwitchExpressionException>(() => Compensation.BicarbonateInRespiratory(MmHg(60), (RespiratoryOnset)9));
 
     private static void IsAround(double expected, double band, ExpectedRange actual)
     {

@@ -9,9 +9,9 @@ public sealed class ExpiratoryTimeConstantTests
     /// <summary>T low, ratio, tau, then the T low that would end the release at 75, 50 and 25 %.</summary>
     public static TheoryData<double, double, double, double, double, double> PublishedReleases => new()
     {
-        { 0.5, 0.60, 0.979, 0.282, 0.678, 1.357 },
+        { 0.5, 0.60, 0.979, 0.282, 0.678, 1.357 }, // 0.67846: 0.679 in print would be tau rounded first
         { 0.5, 0.75, 1.738, 0.500, 1.205, 2.409 },
-        { 0.5, 0.50, 0.721, 0.208, 0.500, 1.000 },
+        { 0.5, 0.50, 0.721, 0.208, 0.500, 1.000 }, // 0.20752: 0.207 in print would be cut off
         { 0.8, 0.25, 0.577, 0.166, 0.400, 0.800 },
         { 0.4, 0.70, 1.121, 0.323, 0.777, 1.555 },
     };

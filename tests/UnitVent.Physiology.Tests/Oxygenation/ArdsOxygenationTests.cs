@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using static UnitVent.Physiology.OxygenationClass;
 using static UnitVent.Physiology.Tests.Given;
 
@@ -88,6 +89,10 @@ public sealed class ArdsOxygenationTests
         Expect.Refused(() => ArdsOxygenation.FromPaO2(150, CmH2O(5), default, AltitudeScaling.Limits));
         Expect.Refused(() => ArdsOxygenation.FromSpO2(SatPercent(92), default, CmH2O(5)));
     }
+
+    [Fact]
+    public void FromPaO2_ByAScalingThatDoesNotExist_Throws()
+        => Assert.Throws<SwitchExpressionException>(() => Berlin(150, 5, 760, (AltitudeScaling)9));
 
     private static OxygenationClass Berlin(double pf, double pressure, double barometric, AltitudeScaling scaling)
         => ArdsOxygenation.FromPaO2(pf, CmH2O(pressure), BarometricPressure.FromMmHg(barometric), scaling);

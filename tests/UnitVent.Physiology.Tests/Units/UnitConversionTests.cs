@@ -50,10 +50,23 @@ public sealed class UnitConversionTests
         => Gen.Double[0, 999].Sample(x => Math.Abs(PartialPressure.FromKilopascals(MmHg(x).Kilopascals).MmHg - x) <= 1e-12 * x);
 
     [Fact]
+    public void Results_OfConvertedInputs_AreThoseOfTheUnconverted()
+        => Gen.Select(Gen.Double[30, 150], Gen.Double[40, 600], Gen.Double[15, 40], Gen.Double[0, 10]).Sample((tension, oxygen, high, low) =>
+            Near(PaO2FiO2Ratio.Compute(MmHg(oxygen), FiO2(0.5)), PaO2FiO2Ratio.Compute(PartialPressure.FromKilopascals(MmHg(oxygen).Kilopascals), FiO2(0.5)))
+            && Near(Ratio(MmHg(tension)), Ratio(PartialPressure.FromKilopascals(tension * 101.325 / 760)))
+            && Near(Mean(CmH2O(high), CmH2O(low)), Mean(AirwayPressure.FromHectopascals(high * 0.980665), AirwayPressure.FromHectopascals(low * 0.980665))));
+
+    [Fact]
     public void SmallerUnits_AreThousandths()
     {
         Assert.Equal(0.42, Ml(420).Litres, 1e-12);
         Assert.Equal(7500, LMin(7.5).MillilitresPerMinute, 1e-9);
         Assert.Equal(0.975, SatPercent(97.5).Fraction, 1e-12);
     }
+
+    private static double Ratio(PartialPressure paCO2) => VentilatoryRatio.Compute(LMin(8), paCO2, Kg(60));
+
+    private static double Mean(AirwayPressure high, AirwayPressure low) => MeanAirwayPressure.Aprv(high, low, Seconds(5), Seconds(0.5)).CmH2O;
+
+    private static bool Near(double expected, double actual) => Math.Abs(expected - actual) <= 1e-12 * expected;
 }

@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using static UnitVent.Physiology.Tests.Given;
 
 namespace UnitVent.Physiology.Tests;
@@ -47,4 +48,8 @@ public sealed class RestingMetabolismTests
         Expect.Refused(() => RestingMetabolism.HarrisBenedictKcalPerDay(LungSizeSex.Male, default, Cm(170), 50));
         Expect.Refused(() => RestingMetabolism.HarrisBenedictKcalPerDay(LungSizeSex.Male, Kg(70), default, 50));
     }
+
+    [Fact]
+    public void HarrisBenedict_OfASexTheFormulaDoesNotKnow_Throws()
+        => Assert.Throws<SwitchExpressionException>(() => RestingMetabolism.HarrisBenedictKcalPerDay((LungSizeSex)9, Kg(70), Cm(170), 50));
 }
