@@ -7,4 +7,8 @@ internal static class Expect
         => Assert.True(Math.Abs(expected - actual) <= tolerance, $"Expected {expected} ± {tolerance}, got {actual}: {reason}.");
 
     public static void Refused(Func<object> compute) => Assert.Throws<ArgumentOutOfRangeException>(compute);
+
+    /// <summary>Refused with these words in the message; a message names the argument too, as in <c>Parameter 'pH'</c>.</summary>
+    public static void RefusedSaying(string words, Func<object> compute)
+        => Assert.Contains(words, Assert.Throws<ArgumentOutOfRangeException>(compute).Message, StringComparison.Ordinal);
 }

@@ -58,7 +58,7 @@ public static class TemperatureCorrection
     {
         var degrees = Degrees(temperatureC);
         var at37 = corrected.MmHg;
-        for (var round = 0; round < Rounds; round++)
+        foreach (var _ in Enumerable.Range(0, Rounds))
         {
             at37 = corrected.MmHg / PO2Factor(at37, degrees);
         }

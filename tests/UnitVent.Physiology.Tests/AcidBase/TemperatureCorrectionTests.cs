@@ -82,8 +82,8 @@ public sealed class TemperatureCorrectionTests
     [Fact]
     public void Correction_BeyondWhatATypeHolds_Refuses()
     {
-        Expect.Refused(() => TemperatureCorrection.PH(default, 37));
-        Expect.Refused(() => TemperatureCorrection.PHAt37(default, 37));
+        Expect.RefusedSaying("Parameter 'at37'", () => TemperatureCorrection.PH(default, 37));
+        Expect.RefusedSaying("Parameter 'corrected'", () => TemperatureCorrection.PHAt37(default, 37));
         Expect.Refused(() => TemperatureCorrection.PH(Ph(8.5), 25));
         Expect.Refused(() => TemperatureCorrection.PCO2(MmHg(1000), 38));
         Expect.Refused(() => TemperatureCorrection.PO2(MmHg(1000), 38));

@@ -37,7 +37,7 @@ public sealed class PredictedBodyWeightTests
     }
 
     [Fact]
-    public void Compute_WithoutHeight_Refuses() => Expect.Refused(() => PredictedBodyWeight.Compute(Male, default));
+    public void Compute_WithoutHeight_Refuses() => Expect.RefusedSaying("Parameter 'height'", () => PredictedBodyWeight.Compute(Male, default));
 
     [Fact]
     public void Compute_ForAValueThatIsNoSex_Throws()

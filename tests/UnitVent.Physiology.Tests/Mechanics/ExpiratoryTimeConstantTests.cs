@@ -70,6 +70,10 @@ public sealed class ExpiratoryTimeConstantTests
     [Theory]
     [InlineData(0.5, 0, false)]
     [InlineData(0.5, 0.001, true)]
+    [InlineData(0.5, 1e-9, true)] // the lowest ratio there is
+    [InlineData(0.5, 9e-10, false)]
+    [InlineData(1e-15, 0.9999999999999999, true)] // the highest ratio there is
+    [InlineData(60, 0.36787944117144233, true)] // tau of 60 s itself
     [InlineData(0.5, 0.9915, true)] // 58.6 s
     [InlineData(0.5, 0.9918, false)] // 60.7 s
     [InlineData(0.5, 1, false)]

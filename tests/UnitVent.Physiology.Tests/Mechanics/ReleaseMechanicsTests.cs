@@ -94,6 +94,7 @@ public sealed class ReleaseMechanicsTests
 
     [Theory]
     [InlineData(0.1001, true)] // 0.5 L leave within 0.1 s
+    [InlineData(0.1, true)] // 300 L/min itself
     [InlineData(0.0999, false)]
     [InlineData(0, false)]
     public void CanModelPeakFlow_AroundItsLimits_DecidesWhetherPeakFlowRefuses(double tau, bool expected)
@@ -103,6 +104,14 @@ public sealed class ReleaseMechanicsTests
     }
 
     [Fact]
+    public void CanEstimateCompliance_OfTheHighestCompliance_IsTrue()
+        => Assert.True(ReleaseMechanics.CanEstimateCompliance(Ml(500), CmH2O(1), CmH2O(0), 0));
+
+    [Fact]
+    public void ModelPeakFlow_WithoutATimeConstant_SaysSo()
+        => Expect.RefusedSaying("Parameter 'tau'", () => ReleaseMechanics.ModelPeakFlow(Ml(500), default, 0));
+
+    [Fact]
     public void EffectiveResistance_WithoutCompliance_Refuses()
-        => Expect.Refused(() => ReleaseMechanics.EffectiveResistance(Seconds(1), default));
+        => Expect.RefusedSaying("Parameter 'compliance'", () => ReleaseMechanics.EffectiveResistance(Seconds(1), default));
 }

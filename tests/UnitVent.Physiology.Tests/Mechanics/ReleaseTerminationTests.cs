@@ -27,4 +27,8 @@ public sealed class ReleaseTerminationTests
         Assert.Equal(expected, ReleaseTermination.IsDefined(FlowLMin(peak), FlowLMin(end)));
         Assert.Equal(expected, Record.Exception(() => ReleaseTermination.Ratio(FlowLMin(peak), FlowLMin(end))) is null);
     }
+
+    [Fact]
+    public void Ratio_ThatIsNotDefined_SaysWhy()
+        => Expect.RefusedSaying("must be below the peak flow", () => ReleaseTermination.Ratio(FlowLMin(60), FlowLMin(60)));
 }

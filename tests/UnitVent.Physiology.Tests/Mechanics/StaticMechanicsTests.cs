@@ -21,6 +21,7 @@ public sealed class StaticMechanicsTests
 
     [Theory]
     [InlineData(420, 10.85, 10, true)] // 494 mL/cmH2O
+    [InlineData(500, 11, 10, true)] // 500 mL/cmH2O itself
     [InlineData(420, 10.83, 10, false)] // 506 mL/cmH2O
     [InlineData(420, 10, 10, false)]
     [InlineData(420, 9.9, 10, false)]

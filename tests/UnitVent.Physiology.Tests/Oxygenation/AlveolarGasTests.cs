@@ -55,10 +55,18 @@ public sealed class AlveolarGasTests
     }
 
     [Fact]
+    public void IsDefined_WhereExactlyNothingIsLeft_IsFalse()
+    {
+        Assert.False(AlveolarGas.IsDefined(FiO2(1), BarometricPressure.FromMmHg(247), MmHg(200)));
+        Expect.Refused(() => Alveolar(1, 247, 200));
+    }
+
+    [Fact]
     public void Equations_WithoutAnInput_Refuse()
     {
-        Expect.Refused(() => AlveolarGas.AlveolarPO2(default, BarometricPressure.FromMmHg(760), MmHg(40)));
-        Expect.Refused(() => AlveolarGas.AlveolarPO2(FiO2(0.5), default, MmHg(40)));
+        Expect.RefusedSaying("Parameter 'fiO2'", () => AlveolarGas.AlveolarPO2(default, BarometricPressure.FromMmHg(760), MmHg(40)));
+        Expect.RefusedSaying("Parameter 'barometric'", () => AlveolarGas.AlveolarPO2(FiO2(0.5), default, MmHg(40)));
+        Expect.RefusedSaying("Parameter 'paCO2'", () => Alveolar(0.21, 760, 130));
         Expect.Refused(() => AlveolarGas.ArterialAlveolarRatio(default, MmHg(80)));
     }
 

@@ -74,6 +74,10 @@ public sealed class ArdsOxygenationTests
         double pf, double barometric, AltitudeScaling scaling, OxygenationClass expected, string reason)
         => Assert.True(expected == Berlin(pf, 5, barometric, scaling), reason);
 
+    [Fact]
+    public void FromPaO2_At1000MetresItself_ScalesNothing()
+        => Assert.Equal(Mild, Berlin(300, 5, BarometricPressure.FromAltitude(1000).MmHg, AltitudeScaling.Limits));
+
     [Theory]
     [InlineData(-0.1)]
     [InlineData(6000.1)]
@@ -88,6 +92,7 @@ public sealed class ArdsOxygenationTests
     {
         Expect.Refused(() => ArdsOxygenation.FromPaO2(150, CmH2O(5), default, AltitudeScaling.Limits));
         Expect.Refused(() => ArdsOxygenation.FromSpO2(SatPercent(92), default, CmH2O(5)));
+        Expect.Refused(() => ArdsOxygenation.FromSpO2(SatPercent(99), default, CmH2O(5)));
     }
 
     [Fact]

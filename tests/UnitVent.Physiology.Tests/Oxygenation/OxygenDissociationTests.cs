@@ -145,8 +145,8 @@ public sealed class OxygenDissociationTests
     [Fact]
     public void VirtualPartialPressure_WithoutAnInputOrBeyondRange_Refuses()
     {
-        Expect.Refused(() => Virtual(MmHg(60), default, 37, MmHg(40)));
-        Expect.Refused(() => Virtual(MmHg(60), Ph(7.4), 37, default));
+        Expect.RefusedSaying("Parameter 'pH'", () => Virtual(MmHg(60), default, 37, MmHg(40)));
+        Expect.RefusedSaying("Parameter 'pCO2'", () => Virtual(MmHg(60), Ph(7.4), 37, default));
         Expect.Refused(() => Virtual(MmHg(1000), Ph(8.0), 37, MmHg(40)));
     }
 

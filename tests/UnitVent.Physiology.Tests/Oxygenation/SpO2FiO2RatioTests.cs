@@ -26,6 +26,7 @@ public sealed class SpO2FiO2RatioTests
         { 100, false, "no information at all" },
         { 80, true, "weak, but the ratio is defined" },
         { 0, false, "never measured" },
+        { 1e-9, true, "the lowest there is" },
     };
 
     [Theory, MemberData(nameof(PublishedLine))]
@@ -54,6 +55,7 @@ public sealed class SpO2FiO2RatioTests
     [InlineData(64, false)]
     [InlineData(63.9, false)]
     [InlineData(538.8, true)]
+    [InlineData(97 / 0.18, true)] // the highest there is
     [InlineData(539, false)]
     [InlineData(double.NaN, false)]
     [InlineData(double.PositiveInfinity, false)]
@@ -66,4 +68,11 @@ public sealed class SpO2FiO2RatioTests
     [Fact]
     public void ImputePaO2FiO2_OfTheLinesOwnForward_ReturnsItself()
         => Gen.Double[20, 560].Sample(pf => Math.Abs(SpO2FiO2Ratio.ImputePaO2FiO2(64 + (0.84 * pf)) - pf) < 1e-9);
+
+    [Fact]
+    public void Refusals_SayWhy()
+    {
+        Expect.RefusedSaying("above 64 and up to 539", () => SpO2FiO2Ratio.ImputePaO2FiO2(64));
+        Expect.RefusedSaying("above 0 % and up to 97 %", () => SpO2FiO2Ratio.Compute(SatPercent(98), FiO2(0.5)));
+    }
 }

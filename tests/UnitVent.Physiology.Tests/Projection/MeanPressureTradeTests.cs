@@ -52,8 +52,8 @@ public sealed class MeanPressureTradeTests
     public void High_WithoutAMeanAboveLowOrATime_Refuses()
     {
         Expect.Refused(() => MeanPressureTrade.High(CmH2O(5), CmH2O(5), Seconds(5), Seconds(0.5)));
-        Expect.Refused(() => MeanPressureTrade.High(CmH2O(25), CmH2O(0), Seconds(0), Seconds(0.5)));
-        Expect.Refused(() => MeanPressureTrade.High(CmH2O(25), CmH2O(0), Seconds(5), Seconds(0)));
+        Expect.RefusedSaying("Parameter 'timeHigh'", () => MeanPressureTrade.High(CmH2O(25), CmH2O(0), Seconds(0), Seconds(0.5)));
+        Expect.RefusedSaying("Parameter 'timeLow'", () => MeanPressureTrade.High(CmH2O(25), CmH2O(0), Seconds(5), Seconds(0)));
         Expect.Refused(() => MeanPressureTrade.High(CmH2O(100), CmH2O(0), Seconds(0.5), Seconds(1)));
     }
 

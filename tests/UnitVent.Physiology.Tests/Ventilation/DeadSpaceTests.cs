@@ -91,4 +91,8 @@ public sealed class DeadSpaceTests
         => Gen.Select(Gen.Double[100, 400], Gen.Double[4, 20], Gen.Double[20, 100]).Sample((output, ventilation, arterial) =>
             Math.Abs((DeadSpace.FromCarbonDioxideOutput(output, LMin(ventilation), MmHg(arterial)) * ventilation)
                 + DeadSpace.AlveolarLitresPerMinute(output, MmHg(arterial)) - ventilation) < 1e-9);
+
+    [Fact]
+    public void Enghoff_OfAnEndTidalTension_SaysWhy()
+        => Expect.RefusedSaying("at most 0.9 of the arterial", () => DeadSpace.Enghoff(MmHg(40), MmHg(38)));
 }

@@ -67,4 +67,8 @@ public sealed class MinuteVentilationSplitTests
             var split = MinuteVentilationSplit.DeriveSpontaneous(LMin(total), LMin(total * part));
             return Math.Abs(split.Spontaneous.LitresPerMinute + (total * part) - total) < 1e-9 && split.SharePercent is >= 0 and <= 100;
         });
+
+    [Fact]
+    public void DeriveSpontaneous_OfContradictingReadings_SaysWhy()
+        => Expect.RefusedSaying("exceeds the total by more than 5 %", () => MinuteVentilationSplit.DeriveSpontaneous(LMin(5), LMin(6)));
 }

@@ -68,7 +68,10 @@ public sealed class VentilatorFreeDaysTests
 
     [Fact]
     public void Compute_WithoutSpells_Refuses()
-        => Assert.Throws<ArgumentNullException>(() => VentilatorFreeDays.Compute(null!, TimeSpan.FromHours(48), null));
+    {
+        Assert.Throws<ArgumentNullException>(() => VentilatorFreeDays.Compute(null!, TimeSpan.FromHours(48), null));
+        Expect.RefusedSaying("Parameter 'spells'", () => Compute([], 48, null));
+    }
 
     [Fact]
     public void FreeDays_WithALongerWindow_AreNeverMore()
