@@ -23,6 +23,9 @@ public sealed record UnitProfile(Guid Id, string Code, string Name, DateTimeZone
     /// <summary>Gets how often a ventilator check is due.</summary>
     public Duration CheckInterval { get; init; } = Duration.FromHours(4);
 
+    /// <summary>Gets how far back drift is looked for, 6–48 h.</summary>
+    public Duration DriftWindow { get; init; } = Duration.FromHours(24);
+
     /// <summary>Gets the times at which shifts begin, in order.</summary>
     public IReadOnlyList<LocalTime> ShiftStarts { get; init; } = [new LocalTime(7, 0), new LocalTime(19, 0)];
 

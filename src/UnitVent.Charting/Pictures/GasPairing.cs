@@ -9,7 +9,6 @@ namespace UnitVent.Charting.Pictures;
 public static class GasPairing
 {
     private static readonly Duration ChecksNear = Duration.FromMinutes(60);
-    private static readonly Duration Disturbed = Duration.FromMinutes(20);
     private static readonly Duration OxygenSettles = Duration.FromMinutes(10);
 
     /// <summary>The gas with what belongs to it.</summary>
@@ -20,7 +19,7 @@ public static class GasPairing
         return new PairedGas(gas, settings, check)
         {
             Prone = InForce.Prone(window, gas.At),
-            Unsettled = Unsettled(window, gas, settings),
+            Unsettled = Settling.IsDisturbed(window, gas.At) || Settling.OfOxygenLasts(window, settings, gas.At),
             Values = AtDraw(gas, settings, check, ChangedJustBefore(window, gas)).ToDictionary(v => v.Name),
         };
     }
@@ -66,15 +65,6 @@ public static class GasPairing
     private static bool PressuresOrOxygenDiffer(SettingChange one, SettingChange other) =>
         one.FiO2 != other.FiO2 || one.PHighCmH2O != other.PHighCmH2O || one.PLowCmH2O != other.PLowCmH2O || one.PeepCmH2O != other.PeepCmH2O
         || one.InspiratoryPressureAbovePeepCmH2O != other.InspiratoryPressureAbovePeepCmH2O || one.PressureSupportCmH2O != other.PressureSupportCmH2O;
-
-    private static bool Unsettled(ChartWindow window, Charted<BloodGas> gas, Charted<SettingChange>? settings)
-    {
-        var disturbed = window.Latest<BedsideEvent>(
-            EntryKind.Event,
-            gas.At,
-            e => e.What is EventKind.Suction or EventKind.Disconnection or EventKind.Bronchoscopy or EventKind.Prone or EventKind.Supine or EventKind.Side);
-        return (disturbed is { } d && gas.At - d.At < Disturbed) || (settings is { } s && gas.At >= s.At && gas.At - s.At < Settling.OfOxygen(window, s));
-    }
 
     private static IEnumerable<PictureValue> AtDraw(
         Charted<BloodGas> gas, Charted<SettingChange>? settings, Charted<VentilatorCheck>? check, bool changedJustBefore)

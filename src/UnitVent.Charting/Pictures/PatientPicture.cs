@@ -1,6 +1,7 @@
 using NodaTime;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Rules;
+using UnitVent.Charting.Trends;
 using UnitVent.Charting.Windows;
 
 namespace UnitVent.Charting.Pictures;
@@ -91,6 +92,9 @@ public sealed class PatientPicture
 
     /// <summary>Gets the first later instant at which time alone changes anything; null when none does.</summary>
     public Instant? NextChangeAt { get; }
+
+    /// <summary>Gets what drifts, over the unit's window within the present epoch. Computed when first asked for.</summary>
+    public PatientDrifts Drifts => field ??= PatientDrifts.Of(this);
 
     /// <summary>Gets the value with a name.</summary>
     /// <exception cref="KeyNotFoundException">There is no such value.</exception>

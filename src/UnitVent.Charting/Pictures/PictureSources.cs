@@ -20,8 +20,6 @@ internal sealed class PictureSources
         Check = window.Latest<VentilatorCheck>(EntryKind.VentilatorCheck, now);
         Limits = new AgeLimits(window.Unit, Settings?.Body.Mode, Phase);
         SettingsConfirmedAt = Confirmed();
-        var gas = window.Latest<BloodGas>(EntryKind.BloodGas, now, g => g.Specimen == Specimen.Arterial);
-        LatestArterial = gas is { } arterial ? GasPairing.Pair(window, arterial) : null;
     }
 
     public ChartWindow Window { get; }
@@ -40,7 +38,9 @@ internal sealed class PictureSources
 
     public Charted<VentilatorCheck>? Check { get; }
 
-    public PairedGas? LatestArterial { get; }
+    public PairedGas? LatestArterial => field ??= Window.Latest<BloodGas>(EntryKind.BloodGas, Now, g => g.Specimen == Specimen.Arterial) is { } gas
+        ? GasPairing.Pair(Window, gas)
+        : null;
 
     public AgeLimits Limits { get; }
 

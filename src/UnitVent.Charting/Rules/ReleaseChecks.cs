@@ -20,8 +20,11 @@ internal static class ReleaseChecks
             : null;
 
     /// <summary>Why the mechanics of a check are not valid; null when they are.</summary>
-    public static string? NotValid(PatientPicture picture, Charted<VentilatorCheck> check) =>
-        check.Body.EffortDuringRelease == true ? "Not valid: effort during the release."
-        : picture.Has(Circumstance.AirLeak) || check.Body.LeakPercent > LeakThatInvalidatesPercent ? "Not valid with a leak."
+    public static string? NotValid(PatientPicture picture, Charted<VentilatorCheck> check) => NotValid(check.Body, picture.Has(Circumstance.AirLeak));
+
+    /// <summary>Why the mechanics of a check are not valid; null when they are.</summary>
+    public static string? NotValid(VentilatorCheck check, bool airLeak) =>
+        check.EffortDuringRelease == true ? "Not valid: effort during the release."
+        : airLeak || check.LeakPercent > LeakThatInvalidatesPercent ? "Not valid with a leak."
         : null;
 }

@@ -1,7 +1,6 @@
 using NodaTime;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Pictures;
-using UnitVent.Charting.Rules;
 using UnitVent.Charting.Windows;
 
 namespace UnitVent.Charting.Timelines;
@@ -49,17 +48,20 @@ public sealed record Timeline(Instant From, Instant To, IReadOnlyList<TimelineSe
 
     private static IEnumerable<TimelineSeries> Checks(ChartWindow window, Instant from, Instant to)
     {
-        var checks = InRange<VentilatorCheck>(window, EntryKind.VentilatorCheck, from, to, false).ToList();
-        var weight = Episodes.BodySize.PredictedWeightKg(window.Episode.Patient);
-        yield return Line(ValueNames.MeanAirwayPressureMeasured, "mean airway pressure, measured", "cmH2O", c => (double?)c.MeanAirwayPressureCmH2O);
-        yield return Line(ValueNames.EndReleaseFlowPercent, "end-release flow", "% of peak", ReleaseChecks.EndFlowPercent);
-        yield return Line(ValueNames.ReleaseVolumePerKg, "release volume", "mL/kg", c => (double?)c.ReleaseVolumeMl / weight);
-        yield return Line("spO2Percent", "SpO2", "%", c => (double?)c.SpO2Percent);
-        yield return Line("totalMinuteVolumeLMin", "total minute volume", "L/min", c => (double?)c.TotalMinuteVolumeLMin);
-        yield return Line("totalRatePerMin", "total rate", "/min", c => (double?)c.TotalRatePerMin);
+        var checks = InRange<VentilatorCheck>(window, EntryKind.VentilatorCheck, from, to, false).Select(c => new CheckValues(window, c)).ToList();
+        yield return Read(ValueNames.MeanAirwayPressureMeasured, "mean airway pressure, measured", "cmH2O", c => c.MeanAirwayPressureCmH2O);
+        yield return Computed(ValueNames.EndReleaseFlowPercent, "end-release flow", "% of peak");
+        yield return Computed(ValueNames.ReleaseVolumePerKg, "release volume", "mL/kg");
+        yield return Read("spO2Percent", "SpO2", "%", c => c.SpO2Percent);
+        yield return Read("totalMinuteVolumeLMin", "total minute volume", "L/min", c => c.TotalMinuteVolumeLMin);
+        yield return Read("totalRatePerMin", "total rate", "/min", c => c.TotalRatePerMin);
 
-        TimelineSeries Line(string name, string label, string unit, Func<VentilatorCheck, double?> value) => new(
-            name, label, unit, false, [.. checks.Where(c => value(c.Body) is not null).Select(c => new TimelinePoint(c.At, value(c.Body), c.Id))]);
+        TimelineSeries Computed(string name, string label, string unit) => Line(name, label, unit, c => c[name]?.Value);
+
+        TimelineSeries Read(string name, string label, string unit, Func<VentilatorCheck, decimal?> member) => Line(name, label, unit, c => (double?)member(c.Check.Body));
+
+        TimelineSeries Line(string name, string label, string unit, Func<CheckValues, double?> value) => new(
+            name, label, unit, false, [.. checks.Where(c => value(c) is not null).Select(c => new TimelinePoint(c.Check.At, value(c), c.Check.Id))]);
     }
 
     private static IEnumerable<Charted<T>> InRange<T>(ChartWindow window, EntryKind kind, Instant from, Instant to, bool withLastBefore)

@@ -32,17 +32,31 @@ public static class TimelineMarks
         }
     }
 
-    /// <summary>What one setting change changed against the settings before it, for example "P high 28 → 26 cmH2O".</summary>
-    public static string Changed(SettingChange? before, SettingChange after)
+    /// <summary>The setting changes of a range that changed anything; a confirmation does not.</summary>
+    internal static IEnumerable<TimelineMark> SettingChanges(ChartWindow window, Instant from, Instant to)
     {
-        var changes = EntryFields.Of<SettingChange>()
+        SettingChange? before = null;
+        foreach (var change in window.Of<SettingChange>(EntryKind.SettingChange, to))
+        {
+            if (change.At >= from && before is not null && Changes(before, change.Body) is { Count: > 0 } changes)
+            {
+                yield return new(change.At, "settingChange", string.Join(", ", changes), change.Id);
+            }
+
+            before = change.Body;
+        }
+    }
+
+    /// <summary>What one setting change changed against the settings before it, for example "P high 28 → 26 cmH2O".</summary>
+    public static string Changed(SettingChange? before, SettingChange after) =>
+        Changes(before, after) is { Count: > 0 } changes ? string.Join(", ", changes) : "settings confirmed";
+
+    private static List<string> Changes(SettingChange? before, SettingChange after) =>
+        [.. EntryFields.Of<SettingChange>()
             .Where(f => !NotSettings.Contains(f.Name))
             .Select(f => (Field: f, Before: before is null ? null : f.ValueIn(before), After: f.ValueIn(after)))
             .Where(c => c.After is not null && !Equals(c.Before, c.After))
-            .Select(c => $"{c.Field.Label} {(c.Before is null ? "" : Shown(c.Before) + " → ")}{Shown(c.After!)}{Unit(c.Field)}")
-            .ToList();
-        return changes.Count == 0 ? "settings confirmed" : string.Join(", ", changes);
-    }
+            .Select(c => $"{c.Field.Label} {(c.Before is null ? "" : Shown(c.Before) + " → ")}{Shown(c.After!)}{Unit(c.Field)}")];
 
     private static string Unit(EntryField field) => field.Number is { Unit.Length: > 0 } number ? " " + number.Unit : "";
 

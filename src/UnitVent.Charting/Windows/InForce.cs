@@ -97,8 +97,9 @@ public static class InForce
             (start, mode) = change.Body.Mode == mode ? (start, mode) : (change.At, change.Body.Mode);
         }
 
-        var turn = window.Latest<BedsideEvent>(EntryKind.Event, at, e => StartsEpoch(e.What!.Value))?.At ?? Instant.MinValue;
-        return Instant.Max(start, turn);
+        var events = window.Of<BedsideEvent>(EntryKind.Event, at).Where(e => StartsEpoch(e.Body.What!.Value)).Select(e => (e.At, e.Body.Until));
+        var ecmo = window.Of<ContextChange>(EntryKind.Context, at).Where(c => c.Body.Flag is Circumstance.EcmoVv or Circumstance.EcmoVa).Select(c => (c.At, c.Body.Until));
+        return events.Concat(ecmo).Select(e => e.Until is { } end && end <= at ? end : e.At).Append(start).Max();
     }
 
     private static bool StartsEpoch(EventKind kind) => kind is EventKind.Prone or EventKind.Supine or EventKind.Side

@@ -1,0 +1,66 @@
+using NodaTime;
+using UnitVent.Charting.Checking;
+using UnitVent.Charting.Entries;
+using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Rules;
+using UnitVent.Charting.Windows;
+
+namespace UnitVent.Charting.Trends;
+
+/// <summary>The valid points of a patient's series since an instant: settled, of the present mode, each computed with what was in force at its own time.</summary>
+internal sealed class EpochSeries
+{
+    private readonly ChartWindow window;
+    private readonly List<PairedGas> gases;
+    private readonly List<CheckValues> checks;
+
+    public EpochSeries(PatientPicture picture, Instant from)
+    {
+        window = picture.Window;
+        var mode = picture.Settings?.Body.Mode;
+        gases = [.. picture.Gases.Where(g => g.Gas.At >= from && g.Settings?.Body.Mode == mode && !Settling.IsDisturbed(window, g.Gas.At))];
+        checks = [.. window.Of<VentilatorCheck>(EntryKind.VentilatorCheck, picture.AsOf)
+            .Where(c => c.At >= from && InForce.Settings(window, c.At)?.Body.Mode == mode && !Settling.IsDisturbed(window, c.At))
+            .Select(c => new CheckValues(window, c))];
+    }
+
+    /// <summary>A value that rests on the oxygen of a gas.</summary>
+    public IEnumerable<SeriesPoint> OfOxygen(string name) => Points(gases.Where(g => !g.Unsettled), g => g.Gas.At, g => g.Gas.Id, g => g.Values[name].Value);
+
+    /// <summary>A value that rests on the carbon dioxide of a gas; a slip that does not fit itself is left out.</summary>
+    public IEnumerable<SeriesPoint> OfCarbonDioxide(Func<PairedGas, double?> value) => Points(
+        gases.Where(g => !Settling.OfCarbonDioxideLasts(window, g.Settings, g.Gas.At) && !(GasConsistency.Of(g.Gas.Body)?.BeyondRounding > GasConsistency.CautionBeyond)),
+        g => g.Gas.At,
+        g => g.Gas.Id,
+        value);
+
+    /// <summary>What the picture makes of a gas when it is the latest.</summary>
+    public double? AtDraw(PairedGas gas, string name) => Value(GasValues.Of(new PictureSources(window, gas.Gas.At)), name, gas.Gas.Id);
+
+    /// <summary>What the picture makes of a gas and its check together, once both are there.</summary>
+    public double? WithCheck(PairedGas gas, string name) => gas.Check is { } check
+        ? Value(GasValues.Of(new PictureSources(window, Instant.Max(gas.Gas.At, check.At))), name, gas.Gas.Id, check.Id)
+        : null;
+
+    /// <summary>A value of the checks.</summary>
+    public IEnumerable<SeriesPoint> OfChecks(Func<CheckValues, double?> value) => Points(checks, c => c.Check.At, c => c.Check.Id, value);
+
+    /// <summary>The pulse oximeter's readings; while oxygen settles they are left out.</summary>
+    public IEnumerable<SeriesPoint> Saturation() =>
+        OfChecks(c => Settling.OfOxygenLasts(window, InForce.Settings(window, c.Check.At), c.Check.At) ? null : (double?)c.Check.Body.SpO2Percent);
+
+    /// <summary>The mechanics of the releases: effort and leaks make them void, and an estimate counts only within its validated range.</summary>
+    public IEnumerable<SeriesPoint> Mechanics(string name) => OfChecks(c =>
+        c[name] is { } value && (value.Kind != ValueKind.Estimated || value.State == ValueState.Ok) && ReleaseChecks.NotValid(c.Check.Body, Leaks(c.Check.At)) is null
+            ? value.Value
+            : null);
+
+    private bool Leaks(Instant at) => InForce.Context(window, at).Any(c => c.Body.Flag == Circumstance.AirLeak);
+
+    private static double? Value(IEnumerable<PictureValue> values, string name, params Guid[] entries) =>
+        values.First(v => v.Name == name) is var value && entries.All(e => value.Inputs.Any(i => i.Entry == e)) ? value.Value : null;
+
+    // Rounded so that equal values tie in spite of what their binary fractions add.
+    private static IEnumerable<SeriesPoint> Points<T>(IEnumerable<T> from, Func<T, Instant> at, Func<T, Guid> entry, Func<T, double?> value) =>
+        from.Select(x => (X: x, Value: value(x))).Where(p => p.Value is not null).Select(p => new SeriesPoint(at(p.X), Math.Round(p.Value!.Value, 9), entry(p.X)));
+}
