@@ -34,30 +34,43 @@ public static class KendallScores
         var mostInversions = (int)Math.Floor((pairs - score) / 2.0);
         return mostInversions < 0 ? 0
             : mostInversions >= pairs ? 1
-            : Orders(count, groups, mostInversions) / groups.Aggregate(SpecialFunctions.Factorial(count), (total, size) => total / SpecialFunctions.Factorial(size));
+            : Orders(count, groups, mostInversions).Sum(orders => (double)orders) / AllOrders(count, groups);
     }
 
-    /// <summary>The smallest score whose upper tail is no larger than a probability; null when even the largest score's is.</summary>
+    /// <summary>The smallest score whose upper tail is no larger than a probability; null when even that of the largest score is larger.</summary>
     /// <param name="count">How many values there are, none of them equal, 0…30.</param>
     /// <param name="tail">The probability, in (0, 0.5].</param>
+    /// <exception cref="ArgumentOutOfRangeException">There are more than 30 values, or the probability is outside its range.</exception>
     public static int? Smallest(int count, double tail)
     {
-        var groups = Enumerable.Repeat(1, count).ToArray();
-        for (var score = Pairs(count) % 2; score <= Pairs(count); score += 2)
+        ArgumentOutOfRangeException.ThrowIfGreaterThan(count, MostValues);
+        ArgumentOutOfRangeException.ThrowIfNegativeOrZero(tail);
+        ArgumentOutOfRangeException.ThrowIfGreaterThan(tail, 0.5);
+        int[] groups = [.. Enumerable.Repeat(1, count)];
+        var within = tail * AllOrders(count, groups);
+        int? smallest = null;
+        var upTo = 0.0;
+        foreach (var (inversions, orders) in Orders(count, groups, Pairs(count) / 2).Index())
         {
-            if (UpperTail(groups, score) <= tail)
+            upTo += (double)orders;
+            if (upTo > within)
             {
-                return score;
+                break;
             }
+
+            smallest = Pairs(count) - 2 * inversions;
         }
 
-        return null;
+        return smallest;
     }
 
     private static int Pairs(int count) => count * (count - 1) / 2;
 
-    /// <summary>The number of orders with at most so many inversions. Every intermediate is right modulo 2¹²⁸, and so is the end.</summary>
-    private static double Orders(int count, IReadOnlyList<int> groups, int mostInversions)
+    private static double AllOrders(int count, IReadOnlyList<int> groups) =>
+        groups.Aggregate(SpecialFunctions.Factorial(count), (total, size) => total / SpecialFunctions.Factorial(size));
+
+    /// <summary>How many orders have no inversion, one, two, … up to so many. Every intermediate is right modulo 2¹²⁸, and so is the end.</summary>
+    private static UInt128[] Orders(int count, IReadOnlyList<int> groups, int mostInversions)
     {
         var orders = new UInt128[mostInversions + 1];
         orders[0] = 1;
@@ -74,7 +87,7 @@ public static class KendallScores
             }
         }
 
-        return orders.Sum(o => (double)o);
+        return orders;
     }
 
     private static void MultiplyByOneLessPower(UInt128[] orders, int power)
