@@ -12,6 +12,7 @@ internal static class Settling
     private static readonly Duration AfterPressureRaised = Duration.FromMinutes(60);
     private static readonly Duration AfterVentilationRaised = Duration.FromMinutes(30);
     private static readonly Duration AfterVentilationLowered = Duration.FromMinutes(60);
+    private static readonly Duration Longest = Duration.FromMinutes(60);
 
     /// <summary>Whether an instant lies within 20 min after suction, disconnection, bronchoscopy or a turn.</summary>
     public static bool IsDisturbed(ChartWindow window, Instant at) =>
@@ -51,6 +52,7 @@ internal static class Settling
 
     private static bool Lasts(ChartWindow window, Charted<SettingChange>? settings, Instant at, Func<ChartWindow, Charted<SettingChange>, Duration> settling) =>
         settings is { } last && window.Of<SettingChange>(EntryKind.SettingChange, last.At)
+            .SkipWhile(change => at - change.At >= Longest)
             .Any(change => settling(window, change) is var time && time > Duration.Zero && at - change.At < time);
 
     /// <summary>What sets the machine's ventilation, comparable within a mode: pressure step or volume times breaths a minute.</summary>
