@@ -175,6 +175,9 @@ public static class Equations
     /// <summary>Anion gap.</summary>
     public static readonly Equation AnionGap = new("A27", ValueNames.AnionGapMmolL, "mmol/L", "{sodiumMmolL} − {chlorideMmolL} − {bicarbonateComputedMmolL}", "without potassium", "from memory");
 
+    /// <summary>Oxygenation by the ranges of the ARDS definition: 0 better than mild, 1 mild, 2 moderate, 3 severe.</summary>
+    public static readonly Equation OxygenationClass = new("A28", ValueNames.OxygenationClass, "", "P/F {pfRatio} against 300, 200 and 100 mmHg at {peepCmH2O|meanAirwayPressureMeasured|meanAirwayPressureComputed} cmH2O", "needs a PEEP or, in APRV, a mean airway pressure (common practice) of 5 cmH2O; under the barometric pressure of 1000 m the limits are scaled by it ÷ 760 mmHg (from memory); the other criteria of the definition are a person's to judge", "JAMA 2012;307:2526-2533");
+
     /// <summary>Rapid shallow breathing.</summary>
     public static readonly Equation RapidShallow = new("A29", ValueNames.RapidShallowIndex, "/min/L", "{spontaneousRatePerMin} ÷ ({spontaneousTidalVolumeMl} ÷ 1000)", "own breaths at low support; in APRV shown as doubtful: not the published index", "N Engl J Med 1991;324:1445-1450");
 
@@ -200,6 +203,6 @@ public static class Equations
         ReleaseMinuteVolumeBySettings, OwnMinuteVolumeDerived, OwnShare, EndReleaseFlow, TimeConstant, TLowFor75, TLowFor50, TLowFor25, EndReleasePressure, Emptied, AlveolarSwing,
         EffectiveCompliance, EffectiveResistance, PeakFlowModel, EndReleasePressureRefilling, AlveolarSwingRefilling, MeanAlveolarPressure, DrivingPressure, StaticCompliance,
         VentilatoryRatio, AlveolarPO2, AlveolarArterialDifference, ArterialAlveolarRatio, BicarbonateComputed, GasConsistency, StandardBaseExcess, BloodBaseExcess,
-        StandardBicarbonate, SaturationComputed, OxygenContent, ArterialEndTidalGap, AnionGap, RapidShallow, PowerVolumeControlled, PowerPressureControlled, VentilatorDays,
+        StandardBicarbonate, SaturationComputed, OxygenContent, ArterialEndTidalGap, AnionGap, OxygenationClass, RapidShallow, PowerVolumeControlled, PowerPressureControlled, VentilatorDays,
     ];
 }

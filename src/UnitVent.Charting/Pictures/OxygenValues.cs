@@ -13,6 +13,7 @@ internal static class OxygenValues
     {
         yield return FromLatestGas(s, Equations.PfRatio);
         yield return FromLatestGas(s, Equations.OxygenationIndex);
+        yield return OxygenationClassOf(s);
         foreach (var value in BySaturation(s).Concat(Alveolar(s)).Concat(Blood(s)))
         {
             yield return value;
@@ -54,6 +55,25 @@ internal static class OxygenValues
             ? equation.Without(ValueState.Stale, FormattableString.Invariant($"The arterial gas is {(s.Now - gas.Gas.At).TotalHours:0} h old; not calculated.")) with { AsOf = gas.Gas.At, Inputs = value.Inputs }
             : value;
     }
+
+    private static PictureValue OxygenationClassOf(PictureSources s)
+    {
+        var gas = s.LatestArterial;
+        var pressure = gas?.Settings?.Body.Mode == VentilationMode.Aprv
+            ? AsInput(MeanPressure.Best(gas.Values[ValueNames.MeanAirwayPressureComputed], gas.Values[ValueNames.MeanAirwayPressureMeasured]), "mean airway pressure")
+            : PictureSources.Setting(gas?.Settings, "peepCmH2O", "PEEP", "cmH2O", x => x.PeepCmH2O);
+        var value = Equations.OxygenationClass.Of(
+            [AsInput(FromLatestGas(s, Equations.PfRatio), "P/F"), pressure],
+            v => (int)Class(s, v) - (int)Physiology.OxygenationClass.AboveMild,
+            v => Class(s, v) == Physiology.OxygenationClass.NotClassified ? "PEEP or, in APRV, mean airway pressure is below 5 cmH2O." : null);
+        return value with
+        {
+            Word = value.Value switch { 0 => "better than the mild range", 1 => "mild range", 2 => "moderate range", 3 => "severe range", _ => null },
+        };
+    }
+
+    private static OxygenationClass Class(PictureSources s, double[] v) =>
+        ArdsOxygenation.FromPaO2(v[0], AirwayPressure.FromCmH2O(v[1]), s.Barometric, AltitudeScaling.Limits);
 
     private static IEnumerable<PictureValue> BySaturation(PictureSources s)
     {

@@ -19,6 +19,7 @@ public sealed class PatientPicture
         Limits = sources.Limits;
         Values = Computed(sources).ToDictionary(v => v.Name);
         Gases = GasPairing.Arterial(window, now);
+        AcidBase = AcidBaseWords.Of(sources);
         Check = sources.Check;
         Breathing = window.Latest<BreathingCheck>(EntryKind.BreathingCheck, now);
         Airway = window.Latest<AirwayCheck>(EntryKind.AirwayCheck, now);
@@ -53,6 +54,9 @@ public sealed class PatientPicture
 
     /// <summary>Gets the latest arterial gas with its settings; null when there is none.</summary>
     public PairedGas? LatestGas => Gases.Count > 0 ? Gases[^1] : null;
+
+    /// <summary>Gets how the latest arterial gas reads as acid and base, in words; null without a gas young enough.</summary>
+    public string? AcidBase { get; }
 
     /// <summary>Gets the latest ventilator check; null when there is none.</summary>
     public Charted<VentilatorCheck>? Check { get; }

@@ -24,8 +24,11 @@ public sealed record PictureValue(
     Instant? AsOf,
     IReadOnlyList<Reading> Inputs)
 {
+    /// <summary>Gets the word for the value where it stands for a class; null where it is a number.</summary>
+    public string? Word { get; init; }
+
     /// <summary>Gets the equation with the numbers put in and the result, rounded as it is shown; null where nothing was computed.</summary>
     public string? Working => Value is { } value && Equation is { } equation && ValueWords.Of(Name) is { } words
-        ? $"{equation.WithNumbers(Inputs)} → {Numbers.Fixed(value, words.Decimals)} {Unit}".TrimEnd()
+        ? $"{equation.WithNumbers(Inputs)} → {Word ?? $"{Numbers.Fixed(value, words.Decimals)} {Unit}".TrimEnd()}"
         : null;
 }

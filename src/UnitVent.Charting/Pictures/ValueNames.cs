@@ -144,6 +144,9 @@ public static class ValueNames
     /// <summary>arterial End Tidal CO2Gap Mm Hg.</summary>
     public const string ArterialEndTidalCO2GapMmHg = "arterialEndTidalCO2GapMmHg";
 
+    /// <summary>oxygenation class.</summary>
+    public const string OxygenationClass = "oxygenationClass";
+
     /// <summary>ventilator Days.</summary>
     public const string VentilatorDays = "ventilatorDays";
 }

@@ -13,6 +13,7 @@ public sealed record ValueWords(string Name, string Label, int Decimals, bool Is
         ("Oxygenation",
         [
             new(ValueNames.PfRatio, "P/F", 0),
+            new(ValueNames.OxygenationClass, "Oxygenation by the ARDS definition", 0),
             new(ValueNames.OxygenationIndex, "Oxygenation index", 1),
             new(ValueNames.SfRatio, "S/F", 0),
             new(ValueNames.ImputedPfRatio, "P/F imputed from S/F", 0),

@@ -14,7 +14,7 @@ public sealed record PictureBody(
     Band Band,
     string Why,
     IReadOnlyDictionary<string, ValueBody> Values,
-    object? AcidBase,
+    AcidBaseBody? AcidBase,
     IReadOnlyList<FlagBody> Flags)
 {
     public static PictureBody Of(PatientChart chart)
@@ -28,7 +28,10 @@ public sealed record PictureBody(
             standing.Band,
             standing.Why,
             picture.Values.ToDictionary(v => v.Key, v => ValueBody.Of(v.Value)),
-            null,
+            picture.AcidBase is { } says ? new(says) : null,
             [.. standing.Cards.SelectMany(c => c.Flags).Select(FlagBody.Of)]);
     }
 }
+
+/// <summary>How the latest arterial gas reads as acid and base.</summary>
+public sealed record AcidBaseBody(string Says);

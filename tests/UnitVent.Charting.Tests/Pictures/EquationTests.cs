@@ -39,7 +39,7 @@ public sealed class EquationTests
     [Theory, MemberData(nameof(Situations))]
     public void Working_WorkedOutFromItsText_GivesTheValue(string situation)
     {
-        var worked = Charts[situation].Picture().Values.Values.Where(v => v.Working is not null).ToList();
+        var worked = Charts[situation].Picture().Values.Values.Where(v => v.Working is not null && v.Word is null).ToList();
 
         Assert.True(worked.Count > 20, situation);
         Assert.All(worked, v =>
