@@ -1,5 +1,6 @@
 using NodaTime;
 using UnitVent.Charting.Entries;
+using UnitVent.Charting.Rules;
 
 namespace UnitVent.Charting.Pictures;
 
@@ -29,6 +30,11 @@ internal static class Clockwork
                 // Limits are passed when a value is older than them, so a moment later.
                 yield return at!.Value + age + Duration.FromSeconds(1);
             }
+        }
+
+        foreach (var moment in RuleSet.All.SelectMany(r => r.Moments(picture)))
+        {
+            yield return moment + Duration.FromSeconds(1);
         }
 
         foreach (var entry in picture.Window.Standing)

@@ -1,4 +1,5 @@
 using NodaTime;
+using UnitVent.Charting.Checking;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Rules;
 using UnitVent.Charting.Trends;
@@ -57,6 +58,11 @@ public sealed class PatientPicture
 
     /// <summary>Gets how the latest arterial gas reads as acid and base, in words; null without a gas young enough.</summary>
     public string? AcidBase { get; }
+
+    /// <summary>Gets why the latest arterial gas is doubted: its figures do not fit together; null when it is not.</summary>
+    public string? GasDoubt => LatestGas is { Gas.Body: { } slip } && GasConsistency.Of(slip) is { BeyondRounding: > GasConsistency.CautionBeyond }
+        ? $"pH {slip.PH} does not fit pCO2 {slip.PCO2} and bicarbonate {slip.BicarbonateMmolL}"
+        : null;
 
     /// <summary>Gets the latest ventilator check; null when there is none.</summary>
     public Charted<VentilatorCheck>? Check { get; }

@@ -16,6 +16,15 @@ public abstract class Rule
     /// <summary>Gets what it looks for, in a few words.</summary>
     public abstract string Seen { get; }
 
+    /// <summary>Gets what it asks attention for at which level, in words.</summary>
+    public abstract string Levels { get; }
+
+    /// <summary>Gets when it is quiet beside what <see cref="QuietOffUnit"/> and its like say, and what else shifts it; empty when nothing does.</summary>
+    public virtual string Remarks => "";
+
+    /// <summary>Gets whether it rests on a setting: said once and, when somebody has seen it, quiet until the setting changes or 12 h pass.</summary>
+    public virtual bool SaidOnce => false;
+
     /// <summary>Gets whether it stays quiet while the patient is off the ventilator, in transport or in theatre.</summary>
     public virtual bool QuietOffUnit => false;
 
@@ -37,6 +46,9 @@ public abstract class Rule
     /// <param name="picture">The picture that no longer raises it.</param>
     public virtual bool IsBackInside(Finding open, PatientPicture picture) => true;
 
+    /// <summary>The instants, past or to come, at which time alone changes what the rule says of a picture.</summary>
+    public virtual IEnumerable<Instant> Moments(PatientPicture picture) => [];
+
     /// <summary>Looks at a picture that none of the quiet conditions covers.</summary>
     protected abstract RuleOutcome Look(PatientPicture picture);
 
@@ -52,6 +64,16 @@ public abstract class Rule
     /// <summary>The rule saw something.</summary>
     protected RuleOutcome Raise(Severity severity, string says, string lookAt, Instant seenAt, Evidence evidence) =>
         new RuleOutcome.Raised(new Finding(Id, Family, severity, says, lookAt, seenAt, evidence.Numbers, evidence.Entries) { Badness = evidence.Badness });
+
+    /// <summary>The rule saw something in the latest arterial gas. A gas that does not fit itself holds back all but what is urgent, and that says so.</summary>
+    protected RuleOutcome RaiseOnGas(PatientPicture picture, Severity severity, string says, string lookAt, Evidence evidence)
+    {
+        ArgumentNullException.ThrowIfNull(picture);
+        var seenAt = picture.LatestGas!.Gas.At;
+        return picture.GasDoubt is not { } doubt ? Raise(severity, says, lookAt, seenAt, evidence)
+            : severity == Severity.Urgent ? Raise(severity, $"{says}; unconfirmed: {doubt}", lookAt + ", a repeated gas", seenAt, evidence)
+            : CannotTell($"Held back: {doubt}.");
+    }
 
     private string? QuietBecause(PatientPicture picture)
     {

@@ -4,20 +4,39 @@ namespace UnitVent.Charting.Rules;
 public sealed record RuleThresholds
 {
     /// <summary>Gets R01's thresholds.</summary>
+    [OfRule("R01")]
     public Timing.ReleasedLongOptions ReleasedLong { get; init; } = new();
 
     /// <summary>Gets R04's thresholds.</summary>
+    [OfRule("R04")]
     public Volumes.ReleaseVolumeHighOptions ReleaseVolumeHigh { get; init; } = new();
 
     /// <summary>Gets R24's thresholds.</summary>
+    [OfRule("R24")]
     public Collapse.OxygenationWorseOptions OxygenationWorse { get; init; } = new();
 
     /// <summary>Gets R25's thresholds.</summary>
+    [OfRule("R25")]
     public Oxygen.LowOxygenOptions LowOxygen { get; init; } = new();
 
     /// <summary>Gets R32's thresholds.</summary>
+    [OfRule("R32")]
     public Due.CheckDueOptions CheckDue { get; init; } = new();
 
     /// <summary>Gets R56's thresholds.</summary>
+    [OfRule("R56")]
     public Sudden.SuddenChangeOptions SuddenChange { get; init; } = new();
+
+    /// <summary>The defaults with what a unit chose instead, by <see cref="Threshold.Key"/>; a key that is not known is left out.</summary>
+    public static RuleThresholds With(IReadOnlyDictionary<string, double> chosen)
+    {
+        ArgumentNullException.ThrowIfNull(chosen);
+        var thresholds = new RuleThresholds();
+        foreach (var threshold in Threshold.All.Where(t => chosen.ContainsKey(t.Key)))
+        {
+            threshold.Put(thresholds, chosen[threshold.Key]);
+        }
+
+        return thresholds;
+    }
 }

@@ -1,4 +1,5 @@
 using System.Runtime.CompilerServices;
+using UnitVent.Charting.Pictures;
 
 namespace UnitVent.Charting.Tests.Documents;
 
@@ -7,6 +8,17 @@ public sealed class DocumentTests
 {
     [Fact]
     public void Equations_InTheDocument_AreThoseOfTheCode() => AssertCurrent("equations.md", EquationSheet.Text());
+
+    [Fact]
+    public void Rules_InTheDocument_AreThoseOfTheCode() => AssertCurrent("rules.md", RuleSheet.Text());
+
+    [Fact]
+    public void FurtherEquations_NameAMemberThatIsThere() => Assert.All(FurtherEquations.All, further =>
+    {
+        var (type, member) = (further.Code.Split('.')[0], further.Code.Split('.')[1]);
+        var found = typeof(Physiology.AirwayPressure).Assembly.GetExportedTypes().Concat(typeof(PatientPicture).Assembly.GetExportedTypes()).Single(t => t.Name == type);
+        Assert.NotEmpty(found.GetMember(member));
+    });
 
     private static void AssertCurrent(string name, string text, [CallerFilePath] string here = "")
     {

@@ -22,12 +22,20 @@ internal static class EquationSheet
     public static string Text()
     {
         var text = new StringBuilder(Head.ReplaceLineEndings("\n"));
-        text.Append("| id | value | equation | unit | range and limits | source | version |\n|---|---|---|---|---|---|---|\n");
+        text.Append("## Behind the values of the picture\n\n| id | value | equation | unit | range and limits | source | version |\n|---|---|---|---|---|---|---|\n");
         foreach (var e in Equations.All.OrderBy(e => int.Parse(e.Id[1..])))
         {
-            text.Append($"| {e.Id} | {ValueWords.Of(e.Result)?.Label ?? e.Result} | {e.InWords.Replace("|", "\\|")} | {(e.Unit.Length == 0 ? "–" : e.Unit)} | {e.Limits} | {e.Source} | {e.Version} |\n");
+            text.Append($"| {e.Id} | {ValueWords.Of(e.Result)!.Label} | {Cell(e.InWords)} | {Cell(e.Unit)} | {Cell(e.Limits)} | {e.Source} | {e.Version} |\n");
+        }
+
+        text.Append("\n## Projections, what is shown only when asked for, and the statistics of drift\n\n| id | what | equation | unit | range and limits | source | in code |\n|---|---|---|---|---|---|---|\n");
+        foreach (var (e, code) in FurtherEquations.All)
+        {
+            text.Append($"| {e.Id} | {e.Result} | {Cell(e.Form)} | {Cell(e.Unit)} | {Cell(e.Limits)} | {e.Source} | `{code}` |\n");
         }
 
         return text.ToString();
     }
+
+    private static string Cell(string text) => text.Length == 0 ? "–" : text.Replace("|", "\\|");
 }

@@ -65,6 +65,43 @@ public sealed class PictureValueTests
         });
     }
 
+    /// <summary>A day and a half after the last entry only body size, elapsed time and what follows from nothing but them can be had.</summary>
+    [Fact]
+    public void Picture_OfAChartNobodyTouchedSince_GivesNoOldNumberAsNew()
+    {
+        var picture = Chart.Round().Picture(Chart.Now + Duration.FromHours(36));
+
+        Assert.All(picture.Values.Values.Where(v => v.Name is not (ValueNames.PredictedBodyWeightKg or ValueNames.VentilatorDays)), v =>
+        {
+            Assert.Null(v.Value);
+            Assert.Contains(v.State, new[] { ValueState.Stale, ValueState.Missing, ValueState.Mode });
+            Assert.False(string.IsNullOrEmpty(v.Because));
+        });
+    }
+
+    public static TheoryData<string, ValueState, string> Contradictions => new()
+    {
+        { ValueNames.EndReleaseFlowPercent, ValueState.Domain, "end flow is not below the peak" },
+        { ValueNames.ExpiratoryTimeConstantS, ValueState.Domain, "end flow is not below the peak" },
+        { ValueNames.SpontaneousMinuteVolumeDerivedLMin, ValueState.Domain, "exceeds the total minute volume" },
+        { ValueNames.SpontaneousSharePercent, ValueState.Domain, "exceeds the total" },
+        { ValueNames.AlveolarArterialGradientMmHg, ValueState.Domain, "exceeds what the alveoli can hold" },
+        { ValueNames.SfRatio, ValueState.Domain, "not informative above 97 %" },
+        { ValueNames.ImputedPfRatio, ValueState.Domain, "not informative above 97 %" },
+        { ValueNames.OxygenSaturationIndex, ValueState.Domain, "not informative above 97 %" },
+    };
+
+    [Theory, MemberData(nameof(Contradictions))]
+    public void Value_OfReadingsThatContradictEachOther_SaysWhichDoNotFit(string name, ValueState state, string sentence)
+    {
+        var check = Chart.Check(peak: 40, end: 45, spO2: 99) with { SpontaneousMinuteVolumeLMin = null, TotalMinuteVolumeLMin = 3 };
+        var value = new Chart().With(Chart.Aprv(), Chart.Gas(pO2: 500), check).Picture()[name];
+
+        Assert.Equal(state, value.State);
+        Assert.Null(value.Value);
+        Assert.Contains(sentence, value.Because);
+    }
+
     public static TheoryData<string, ValueState, string> StatesOfPressureControl => new()
     {
         { ValueNames.EndReleaseFlowPercent, ValueState.Mode, "only APRV has releases" },

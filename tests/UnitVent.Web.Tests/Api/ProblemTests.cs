@@ -42,16 +42,4 @@ public sealed class ProblemTests(RunningApp app)
         Assert.Equal((HttpStatusCode.NotFound, "application/problem+json"), (answer.Status, answer.MediaType));
     }
 
-    [Fact]
-    public async Task Projection_IsNotThere()
-    {
-        var caller = await Caller.OfAsync(app);
-        Assert.Equal(HttpStatusCode.NotFound, (await SendAsync(caller, await caller.AdmitAsync() + "/projection", "{}")).Status);
-    }
-
-    private static async Task<Answer> SendAsync(Caller caller, string path, string body)
-    {
-        using var content = new StringContent(body, Encoding.UTF8, "application/json");
-        return await caller.SendAsync(HttpMethod.Post, path, content);
-    }
 }

@@ -19,6 +19,12 @@ public sealed class OxygenationWorseRule : Rule
     public override string Seen => "oxygenation worse at equal or higher mean pressure";
 
     /// <inheritdoc/>
+    public override string Levels => "a step alone advisory; a second gas or SpO2 −3 caution; SpO2 under target or PaO2 < 60 mmHg as well urgent";
+
+    /// <inheritdoc/>
+    public override string Remarks => "Quiet within 60 min after a pressure rise, across positions, with FiO2 differing by more than 0.1.";
+
+    /// <inheritdoc/>
     public override bool QuietOnEcmo => true;
 
     /// <inheritdoc/>

@@ -17,6 +17,9 @@ public sealed class CheckDueRule : Rule
     public override string Seen => "ventilator check due";
 
     /// <inheritdoc/>
+    public override string Levels => "5 h advisory, 8 h caution at an interval of 4 h";
+
+    /// <inheritdoc/>
     public override bool QuietOffUnit => true;
 
     /// <inheritdoc/>

@@ -17,6 +17,12 @@ public sealed class NotKnownRule : Rule
     public override string Seen => "not known: readings, settings or gas past their limit";
 
     /// <inheritdoc/>
+    public override string Levels => "past the limit advisory, past twice the limit caution";
+
+    /// <inheritdoc/>
+    public override string Remarks => "Limits: readings 1.5 check intervals; settings 12 h since change or confirmation; gas 12 h, 24 h in weaning, pressure support and CPAP.";
+
+    /// <inheritdoc/>
     public override bool QuietOffUnit => true;
 
     /// <inheritdoc/>

@@ -20,6 +20,12 @@ public sealed class LowOxygenRule : Rule
     public override string Seen => "low oxygen";
 
     /// <inheritdoc/>
+    public override string Levels => "SpO2 under 88 % or PaO2 under 55 mmHg urgent; under the patient’s own target caution";
+
+    /// <inheritdoc/>
+    public override string Remarks => "The target of the patient shifts it, never below the floor.";
+
+    /// <inheritdoc/>
     public override bool QuietInComfortCare => true;
 
     /// <inheritdoc/>

@@ -19,6 +19,12 @@ public sealed class GasDoesNotFitRule : Rule
     public override string Seen => "gas does not fit itself";
 
     /// <inheritdoc/>
+    public override string Levels => "beyond 0.03 advisory, beyond 0.06 caution, after what rounding explains";
+
+    /// <inheritdoc/>
+    public override string Remarks => "Says when it would fit standard bicarbonate.";
+
+    /// <inheritdoc/>
     public override bool QuietInComfortCare => true;
 
     /// <inheritdoc/>

@@ -17,6 +17,12 @@ public sealed class SuddenChangeRule : Rule
     public override string Seen => "sudden fall of SpO2 with blood pressure or volume";
 
     /// <inheritdoc/>
+    public override string Levels => "urgent";
+
+    /// <inheritdoc/>
+    public override string Remarks => "Takes in what it explains: findings of the same check.";
+
+    /// <inheritdoc/>
     public override bool IsBackInside(Finding open, PatientPicture picture)
     {
         var options = picture.Window.Unit.Thresholds.SuddenChange;

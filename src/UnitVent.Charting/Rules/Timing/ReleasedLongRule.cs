@@ -19,6 +19,12 @@ public sealed class ReleasedLongRule : Rule
     public override string Seen => "released long: end-release flow low, % of peak";
 
     /// <inheritdoc/>
+    public override string Levels => "fixed rate: 5 points under the target caution, under the target twice advisory; flow-guided: 15 points caution, 10 points twice advisory; under 25 % urgent when P low is under 5 cmH2O";
+
+    /// <inheritdoc/>
+    public override string Remarks => "The target of the patient shifts the edges. Quiet with effort during the release, a leak, two levels; one release: one level lower; obstructive: own edges.";
+
+    /// <inheritdoc/>
     public override bool IsBackInside(Finding open, PatientPicture picture) =>
         picture[ValueNames.EndReleaseFlowPercent].Value is not { } percent || percent >= Edges.Of(picture).Caution + HalfImportantChange;
 

@@ -18,6 +18,12 @@ public sealed class ReleaseVolumeHighRule : Rule
     public override string Seen => "release volume high";
 
     /// <inheritdoc/>
+    public override string Levels => "over 8 mL/kg advisory, over 10 mL/kg or a swing over 15 cmH2O caution, over 12 mL/kg urgent";
+
+    /// <inheritdoc/>
+    public override string Remarks => "Quiet with a leak; an estimated height or one release: one level lower.";
+
+    /// <inheritdoc/>
     public override bool QuietOnEcmo => true;
 
     /// <inheritdoc/>
