@@ -22,7 +22,6 @@ public static class AprvProjection
     private const double HighestMlPerCmH2O = 150;
     private const double SmallerDeadSpace = 0.7;
     private const double LargerDeadSpace = 1.3;
-    private const double Rounding = 1e-9; // lets 0.6 to 0.9 s be a change of 50 %, which the doubles miss
 
     /// <summary>Projects the change, or gives the reasons why the numbers do not allow it.</summary>
     /// <remarks>Reasons that need the time constant, and those that need the compliance, are told only when these can be trusted.</remarks>
@@ -33,6 +32,8 @@ public static class AprvProjection
         ArgumentNullException.ThrowIfNull(present);
         ArgumentOutOfRangeException.ThrowIfEqual(present.Volume, default, nameof(present));
         ArgumentOutOfRangeException.ThrowIfEqual(present.PaCO2, default, nameof(present));
+        _ = ReleaseCycle.Rate(present.Settings.TimeHigh, present.Settings.TimeLow);
+        _ = ReleaseCycle.Rate(planned.TimeHigh, planned.TimeLow);
 
         var refusals = SizeRefusals(present, planned).ToList();
         if (refusals.Count > 0)
@@ -41,14 +42,14 @@ public static class AprvProjection
         }
 
         var model = new ReleaseModel(present, planned);
-        return model.MlPerCmH2O is >= LowestMlPerCmH2O and <= HighestMlPerCmH2O
+        return Guard.IsWithin(model.MlPerCmH2O, LowestMlPerCmH2O, HighestMlPerCmH2O)
             ? Weigh(present, planned, model)
             : new([ProjectionRefusal.Compliance]);
     }
 
     private static IEnumerable<ProjectionRefusal> SizeRefusals(ReleaseReading present, AprvSettings planned)
     {
-        if (present.TerminationRatio is not (>= LowestRatio and <= HighestRatio))
+        if (!Guard.IsWithin(present.TerminationRatio, LowestRatio, HighestRatio))
         {
             yield return ProjectionRefusal.TerminationRatio;
         }
@@ -70,7 +71,7 @@ public static class AprvProjection
         }
     }
 
-    private static bool ChangesBeyond(double share, double now, double then) => Math.Abs(then - now) > (share * now) + Rounding;
+    private static bool ChangesBeyond(double share, double now, double then) => !Guard.IsWithin(then / now, 1 - share, 1 + share);
 
     private static ProjectionAnswer Weigh(ReleaseReading present, AprvSettings planned, ReleaseModel model)
     {

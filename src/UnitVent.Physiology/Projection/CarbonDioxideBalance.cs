@@ -45,12 +45,12 @@ internal sealed class CarbonDioxideBalance
 
     private IEnumerable<ProjectionRefusal> RefusalsAt(double after)
     {
-        if (after / Before is < LowestVentilationRatio or > HighestVentilationRatio)
+        if (!Guard.IsWithin(after / Before, LowestVentilationRatio, HighestVentilationRatio))
         {
             yield return ProjectionRefusal.AlveolarVentilation;
         }
 
-        if (MmHgAt(after) is < LowestPaCO2MmHg or > HighestPaCO2MmHg)
+        if (!Guard.IsWithin(MmHgAt(after), LowestPaCO2MmHg, HighestPaCO2MmHg))
         {
             yield return ProjectionRefusal.PaCO2;
         }

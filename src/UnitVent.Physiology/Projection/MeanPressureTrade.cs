@@ -8,7 +8,6 @@ namespace UnitVent.Physiology;
 public static class MeanPressureTrade
 {
     private const double LongestCycleSeconds = 12; // 5 releases a minute
-    private const double Rounding = 1e-9; // lets a sum of tenths of a second reach the limit
     private const double LongestSeconds = 60; // what a BreathTime holds
 
     /// <summary>Says whether a T high keeps the mean: P low below the mean, P high above it, and a T high of at most 60 s.</summary>
@@ -54,7 +53,7 @@ public static class MeanPressureTrade
     public static bool IsWithinLimits(BreathTime timeHigh, BreathTime timeLow)
         => KeepsRate(ReleaseCycle.CycleTime(timeHigh, timeLow).Seconds);
 
-    internal static bool KeepsRate(double cycleSeconds) => cycleSeconds <= LongestCycleSeconds + Rounding;
+    internal static bool KeepsRate(double cycleSeconds) => cycleSeconds <= LongestCycleSeconds + Guard.Rounding;
 
     private static double TimeHighSeconds(AirwayPressure mean, AirwayPressure high, AirwayPressure low, BreathTime timeLow)
         => timeLow.Seconds * ((mean.CmH2O - low.CmH2O) / (high.CmH2O - mean.CmH2O));

@@ -18,7 +18,7 @@ public enum ProjectionRefusal
     /// <summary>T low changes by more than 50 %.</summary>
     TimeLow,
 
-    /// <summary>The dead space is not smaller than the release volume, now or after the change.</summary>
+    /// <summary>The dead space is not smaller than the release volume, now or after the change: releases would reach no alveoli.</summary>
     DeadSpace,
 
     /// <summary>Alveolar ventilation would fall below half or rise above twice what it is.</summary>

@@ -11,7 +11,6 @@ public static class StepDownSchedule
 {
     private const double SmallestStepCmH2O = 0.5;
     private const double LargestStepCmH2O = 5;
-    private const double Rounding = 1e-9; // keeps a P high that reaches P low, but for the last digit of a double, from counting as above it
 
     /// <summary>Lists the stages, the present settings first whether or not they keep to the limits.</summary>
     /// <param name="present">The settings to start from.</param>
@@ -26,7 +25,7 @@ public static class StepDownSchedule
         var stages = new List<StepDownStage> { Stage(present) };
         var high = present.High.CmH2O - step.CmH2O;
         var timeHigh = present.TimeHigh.Seconds + stretch.Seconds;
-        while (high > present.Low.CmH2O + Rounding && MeanPressureTrade.KeepsRate(timeHigh + present.TimeLow.Seconds))
+        while (high > present.Low.CmH2O + Guard.Rounding && MeanPressureTrade.KeepsRate(timeHigh + present.TimeLow.Seconds))
         {
             stages.Add(Stage(present with { High = AirwayPressure.FromCmH2O(high), TimeHigh = BreathTime.FromSeconds(timeHigh) }));
             high -= step.CmH2O;
