@@ -29,6 +29,10 @@ public class PictureBenchmarks
     [Benchmark]
     public int DayWithWorkings() => PatientPicture.At(day, Now).Values.Values.Sum(v => v.Working?.Length ?? 0);
 
+    /// <summary>The same day with the verdicts on all quantities whose drift is looked for.</summary>
+    [Benchmark]
+    public int DayWithDrifts() => PatientPicture.At(day, Now).Drifts.All.Count;
+
     private static ChartWindow Window(int gases, int checks, int changes, Duration span)
     {
         var patient = new PatientFacts { Mrn = "1", FamilyName = "Granit", Sex = Sex.Male, HeightCm = 175, BirthDate = new LocalDate(1960, 1, 1) };

@@ -13,6 +13,7 @@ internal sealed class EpochSeries
     private readonly ChartWindow window;
     private readonly List<PairedGas> gases;
     private readonly List<CheckValues> checks;
+    private readonly Dictionary<Instant, List<PictureValue>> ofGasAt = [];
 
     public EpochSeries(PatientPicture picture, Instant from)
     {
@@ -35,11 +36,11 @@ internal sealed class EpochSeries
         value);
 
     /// <summary>What the picture makes of a gas when it is the latest.</summary>
-    public double? AtDraw(PairedGas gas, string name) => Value(GasValues.Of(new PictureSources(window, gas.Gas.At)), name, gas.Gas.Id);
+    public double? AtDraw(PairedGas gas, string name) => Value(gas.Gas.At, name, gas.Gas.Id);
 
     /// <summary>What the picture makes of a gas and its check together, once both are there.</summary>
     public double? WithCheck(PairedGas gas, string name) => gas.Check is { } check
-        ? Value(GasValues.Of(new PictureSources(window, Instant.Max(gas.Gas.At, check.At))), name, gas.Gas.Id, check.Id)
+        ? Value(Instant.Max(gas.Gas.At, check.At), name, gas.Gas.Id, check.Id)
         : null;
 
     /// <summary>A value of the checks.</summary>
@@ -57,8 +58,17 @@ internal sealed class EpochSeries
 
     private bool Leaks(Instant at) => InForce.Context(window, at).Any(c => c.Body.Flag == Circumstance.AirLeak);
 
-    private static double? Value(IEnumerable<PictureValue> values, string name, params Guid[] entries) =>
-        values.First(v => v.Name == name) is var value && entries.All(e => value.Inputs.Any(i => i.Entry == e)) ? value.Value : null;
+    /// <summary>A value as the picture shows it at an instant, when it rests on these entries.</summary>
+    private double? Value(Instant at, string name, params Guid[] entries)
+    {
+        if (!ofGasAt.TryGetValue(at, out var values))
+        {
+            ofGasAt[at] = values = [.. GasValues.Of(new PictureSources(window, at))];
+        }
+
+        var value = values.First(v => v.Name == name);
+        return entries.All(e => value.Inputs.Any(i => i.Entry == e)) ? value.Value : null;
+    }
 
     // Rounded so that equal values tie in spite of what their binary fractions add.
     private static IEnumerable<SeriesPoint> Points<T>(IEnumerable<T> from, Func<T, Instant> at, Func<T, Guid> entry, Func<T, double?> value) =>

@@ -8,7 +8,7 @@ namespace UnitVent.Charting.Trends;
 /// equal values: the q-factorial without ties, the q-multinomial with them. The score is the number of unequal pairs less 2 I.</para>
 /// <para>Source: Kendall MG. Biometrika 1938;30:81-93 (without ties); the q-multinomial counts inversions of a multiset (MacMahon PA. Proc London
 /// Math Soc 1917;s2-15:314-321) [from memory].</para>
-/// <para>Counted in whole numbers: 30! is the largest total that fits into 128 bits with room to spare, hence the limit.</para>
+/// <para>Counted in whole numbers of 128 bits, which hold 30! with room to spare; beyond 30 values the normal law is as good.</para>
 /// </remarks>
 public static class KendallScores
 {

@@ -26,7 +26,7 @@ public sealed class DriftTests
     public void Verdict_AtABoundary(double[] hours, double[] values, DriftVerdict expected, string reason) =>
         Assert.True(expected == Of(DriftVariables.PfRatio, hours, values).Verdict, reason);
 
-    /// <summary>The change that matters at a starting value; physiology page B6, sources as in the table of variables.</summary>
+    /// <summary>The changes that matter from a starting value on, over a series and in a step; sources as each variable names them.</summary>
     public static TheoryData<string, double, double, double> MinimumChanges => new()
     {
         { "pfRatio", 200, 30, 40 }, { "oxygenationIndex", 10, 2, 2.5 },
@@ -47,7 +47,7 @@ public sealed class DriftTests
         Assert.Equal(step, variable.StepMinimum.From(start), 12);
     }
 
-    /// <summary>Twice as far is twice as much worse: which way counts, quantity by quantity.</summary>
+    /// <summary>Which way is worse, quantity by quantity.</summary>
     public static TheoryData<string, double[], DriftDirection, DriftCourse> Courses => new()
     {
         { "pfRatio", [200, 180, 160, 140], DriftDirection.Down, DriftCourse.Worse },
