@@ -53,6 +53,7 @@ public static class StoreRegistration
         services.AddSingleton(p => new AuditTrail(Scope(p), Clock(p)));
         services.AddSingleton(p => new TokenDesk(Scope(p), Clock(p)));
         services.AddSingleton(p => new UnitDesk(Scope(p), Clock(p)));
+        services.AddSingleton(p => new ThresholdDesk(Scope(p), Clock(p)));
         services.AddSingleton(p => new UserDesk(p.GetRequiredService<IServiceScopeFactory>(), Scope(p), Clock(p)));
         services.AddSingleton(p => new SetUpDesk(p.GetRequiredService<IServiceScopeFactory>(), Scope(p), Clock(p)));
     }

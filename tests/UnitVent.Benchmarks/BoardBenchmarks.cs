@@ -51,7 +51,7 @@ public class BoardBenchmarks
     public async Task<int> StoreAsync()
     {
         var (db, unit) = (demo!.Db, demo.UnitId);
-        await WindowLoader.ProfileAsync(db, unit, CancellationToken.None);
+        await WindowLoader.ProfileAsync(db, unit, demo.Now, CancellationToken.None);
         var episodes = await WindowLoader.EpisodesAsync(db, unit, e => e.EndedAt == null, CancellationToken.None);
         var entries = await WindowLoader.EntriesAsync(db, unit, [.. episodes.Select(e => e.Id)], demo.Now - WindowLoader.Span, demo.Now, CancellationToken.None);
         var flags = await db.Flags.AsNoTracking().Where(f => f.UnitId == unit && f.State == FlagState.Open).ToListAsync();

@@ -33,6 +33,9 @@ public enum Operation
     /// <summary>Choose the method.</summary>
     SetMethod,
 
+    /// <summary>Choose the thresholds of the rules, and agree to what somebody else chose.</summary>
+    SetThresholds,
+
     /// <summary>Keep the unit's beds.</summary>
     ManageBeds,
 }

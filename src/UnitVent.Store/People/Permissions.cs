@@ -11,7 +11,7 @@ public static class Permissions
         Operation.Read or Operation.Print => true,
         Operation.Chart or Operation.Admit or Operation.SetPhase => role >= UnitRole.Nurse,
         Operation.Acknowledge or Operation.SetMethod => role >= UnitRole.Therapist,
-        Operation.StrikeOthers or Operation.SetContext => role >= UnitRole.ChargeTherapist,
+        Operation.StrikeOthers or Operation.SetContext or Operation.SetThresholds => role >= UnitRole.ChargeTherapist,
         Operation.ManageBeds => role == UnitRole.ChargeTherapist,
         Operation.SetTargets => role == UnitRole.Physician,
         _ => false,

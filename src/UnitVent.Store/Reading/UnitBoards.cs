@@ -62,7 +62,7 @@ public sealed class UnitBoards
 
     internal static async Task<Result<UnitBoard>> BuildAsync(UnitVentDbContext db, Guid unitId, Instant now, CancellationToken cancellationToken)
     {
-        var profile = await WindowLoader.ProfileAsync(db, unitId, cancellationToken);
+        var profile = await WindowLoader.ProfileAsync(db, unitId, now, cancellationToken);
         var windows = await WindowLoader.OfUnitAsync(db, profile, now, cancellationToken);
         var episodes = windows.Select(w => w.Episode.Id).ToArray();
         var flags = await db.Flags.AsNoTracking().TagWith("UnitBoards.Flags")

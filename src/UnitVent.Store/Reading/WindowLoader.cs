@@ -4,9 +4,11 @@ using NodaTime;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Episodes;
 using UnitVent.Charting.Fields;
+using UnitVent.Charting.Rules;
 using UnitVent.Charting.Windows;
 using UnitVent.Store.Model;
 using UnitVent.Store.Schema;
+using UnitVent.Store.Units;
 
 namespace UnitVent.Store.Reading;
 
@@ -42,7 +44,7 @@ internal static class WindowLoader
     public static async Task<ChartWindow?> OfEpisodeAsync(
         UnitVentDbContext db, Place place, Instant now, CancellationToken cancellationToken, Instant? since = null)
     {
-        var profile = await ProfileAsync(db, place.UnitId, cancellationToken);
+        var profile = await ProfileAsync(db, place.UnitId, now, cancellationToken);
         var episodes = await EpisodesAsync(db, place.UnitId, e => e.Id == place.EpisodeId, cancellationToken);
         return episodes.Count == 0 ? null : (await WindowsAsync(db, profile, episodes, now, since, cancellationToken))[0];
     }
@@ -58,12 +60,20 @@ internal static class WindowLoader
         return await WindowsAsync(db, profile, episodes, now, null, cancellationToken);
     }
 
-    /// <summary>A unit as its charts are read.</summary>
-    public static async Task<UnitProfile> ProfileAsync(UnitVentDbContext db, Guid unitId, CancellationToken cancellationToken)
+    /// <summary>The charts of a unit that were kept between two instants, each whole from two days before.</summary>
+    public static async Task<IReadOnlyList<ChartWindow>> OfDaysAsync(UnitVentDbContext db, Guid unitId, Instant from, Instant to, CancellationToken cancellationToken)
+    {
+        var profile = await ProfileAsync(db, unitId, to, cancellationToken);
+        var episodes = await EpisodesAsync(db, unitId, e => e.EndedAt == null || e.EndedAt > from, cancellationToken);
+        return await WindowsAsync(db, profile, episodes, to, from - Span, cancellationToken);
+    }
+
+    /// <summary>A unit as its charts are read, with the thresholds that were in force at an instant.</summary>
+    public static async Task<UnitProfile> ProfileAsync(UnitVentDbContext db, Guid unitId, Instant at, CancellationToken cancellationToken)
     {
         var unit = await db.Units.AsNoTracking().FirstAsync(u => u.Id == unitId, cancellationToken);
         var beds = await db.Beds.AsNoTracking().Where(b => b.UnitId == unitId && !b.Retired).OrderBy(b => b.Position).Select(b => b.Name).ToListAsync(cancellationToken);
-        return Profile(unit, beds);
+        return Profile(unit, beds) with { Thresholds = RuleThresholds.With(await ThresholdDesk.ChosenAsync(db, unitId, at, cancellationToken)) };
     }
 
     internal static UnitProfile Profile(UnitRow unit, IReadOnlyList<string> beds) => new(unit.Id, unit.Code, unit.Name, DateTimeZoneProviders.Tzdb[unit.TimeZone])

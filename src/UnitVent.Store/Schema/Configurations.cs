@@ -199,3 +199,23 @@ internal sealed class SetUpConfiguration : IEntityTypeConfiguration<SetUpRow>
         builder.Property(s => s.Id).ValueGeneratedNever();
     }
 }
+
+internal sealed class ThresholdVersionConfiguration : IEntityTypeConfiguration<ThresholdVersionRow>
+{
+    public void Configure(EntityTypeBuilder<ThresholdVersionRow> builder)
+    {
+        builder.ToTable("threshold_version").HasKey(v => new { v.UnitId, v.Id });
+        builder.HasIndex(v => new { v.UnitId, v.At });
+        builder.Property(v => v.Chosen).HasColumnType("jsonb");
+        builder.HasOne<UnitRow>().WithMany().HasForeignKey(v => v.UnitId).OnDelete(DeleteBehavior.Restrict);
+    }
+}
+
+internal sealed class ThresholdAnswerConfiguration : IEntityTypeConfiguration<ThresholdAnswerRow>
+{
+    public void Configure(EntityTypeBuilder<ThresholdAnswerRow> builder)
+    {
+        builder.ToTable("threshold_answer").HasKey(a => new { a.UnitId, a.VersionId });
+        builder.HasOne<ThresholdVersionRow>().WithMany().HasForeignKey(a => new { a.UnitId, a.VersionId }).OnDelete(DeleteBehavior.Restrict);
+    }
+}

@@ -36,6 +36,10 @@ internal sealed class UnitVentDbContext(DbContextOptions<UnitVentDbContext> opti
 
     public DbSet<AuditEventRow> AuditEvents => Set<AuditEventRow>();
 
+    public DbSet<ThresholdVersionRow> ThresholdVersions => Set<ThresholdVersionRow>();
+
+    public DbSet<ThresholdAnswerRow> ThresholdAnswers => Set<ThresholdAnswerRow>();
+
     public DbSet<UnitLookupRow> UnitLookups => Set<UnitLookupRow>();
 
     public DbSet<MembershipRow> Memberships => Set<MembershipRow>();

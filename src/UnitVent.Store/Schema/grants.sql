@@ -4,7 +4,8 @@ declare t text;
 begin
     execute format('grant usage on schema public to %I', '{role}');
     execute format('revoke all on all tables in schema public from %I', '{role}');
-    foreach t in array array['entry', 'strike_out', 'follow_up_step', 'flag_event', 'episode_event', 'patient_fact', 'audit_event', 'unit_lookup']
+    foreach t in array array['entry', 'strike_out', 'follow_up_step', 'flag_event', 'episode_event', 'patient_fact', 'audit_event', 'unit_lookup',
+                             'threshold_version', 'threshold_answer']
     loop
         execute format('grant select, insert on %I to %I', t, '{role}');
     end loop;

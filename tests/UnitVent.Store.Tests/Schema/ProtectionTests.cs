@@ -7,9 +7,9 @@ namespace UnitVent.Store.Tests.Schema;
 
 public sealed class ProtectionTests(TestStore store) : IClassFixture<TestStore>
 {
-    public static TheoryData<string> AppendOnly => ["entry", "strike_out", "follow_up_step", "flag_event", "episode_event", "patient_fact", "audit_event"];
+    public static TheoryData<string> AppendOnly => ["entry", "strike_out", "follow_up_step", "flag_event", "episode_event", "patient_fact", "audit_event", "threshold_version", "threshold_answer"];
 
-    public static TheoryData<string> Scoped => ["patient", "patient_fact", "episode", "bed_stay", "episode_event", "entry", "strike_out", "follow_up_step", "flag", "flag_event", "audit_event"];
+    public static TheoryData<string> Scoped => ["patient", "patient_fact", "episode", "bed_stay", "episode_event", "entry", "strike_out", "follow_up_step", "flag", "flag_event", "audit_event", "threshold_version", "threshold_answer"];
 
     [Theory, MemberData(nameof(AppendOnly))]
     public async Task RuntimeRole_MayNotChangeRemoveOrTruncate(string table)
@@ -72,7 +72,7 @@ public sealed class ProtectionTests(TestStore store) : IClassFixture<TestStore>
     {
         await Task.WhenAll(Enumerable.Range(0, 3).Select(_ => StoreMigrations.MigrateAsync(store.Owner, DatabaseRoles.Runtime, TestStore.Cancel)));
 
-        Assert.Equal(1, await Sql.AskAsync<long>(store.Owner, "select count(*) from \"__EFMigrationsHistory\""));
+        Assert.Equal(2, await Sql.AskAsync<long>(store.Owner, "select count(*) from \"__EFMigrationsHistory\""));
     }
 
     [Fact]

@@ -914,6 +914,85 @@ namespace UnitVent.Store.Schema.Migrations
                     b.ToTable("strike_out", (string)null);
                 });
 
+            modelBuilder.Entity("UnitVent.Store.Model.ThresholdAnswerRow", b =>
+                {
+                    b.Property<Guid>("UnitId")
+                        .HasColumnType("uuid")
+                        .HasColumnName("unit_id");
+
+                    b.Property<Guid>("VersionId")
+                        .HasColumnType("uuid")
+                        .HasColumnName("version_id");
+
+                    b.Property<bool>("Agrees")
+                        .HasColumnType("boolean")
+                        .HasColumnName("agrees");
+
+                    b.Property<Instant>("At")
+                        .HasColumnType("timestamp with time zone")
+                        .HasColumnName("at");
+
+                    b.Property<string>("By")
+                        .IsRequired()
+                        .HasColumnType("text")
+                        .HasColumnName("by");
+
+                    b.Property<Guid?>("ById")
+                        .HasColumnType("uuid")
+                        .HasColumnName("by_id");
+
+                    b.HasKey("UnitId", "VersionId")
+                        .HasName("pk_threshold_answer");
+
+                    b.ToTable("threshold_answer", (string)null);
+                });
+
+            modelBuilder.Entity("UnitVent.Store.Model.ThresholdVersionRow", b =>
+                {
+                    b.Property<Guid>("UnitId")
+                        .HasColumnType("uuid")
+                        .HasColumnName("unit_id");
+
+                    b.Property<Guid>("Id")
+                        .HasColumnType("uuid")
+                        .HasColumnName("id");
+
+                    b.Property<Instant>("At")
+                        .HasColumnType("timestamp with time zone")
+                        .HasColumnName("at");
+
+                    b.Property<string>("By")
+                        .IsRequired()
+                        .HasColumnType("text")
+                        .HasColumnName("by");
+
+                    b.Property<Guid?>("ById")
+                        .HasColumnType("uuid")
+                        .HasColumnName("by_id");
+
+                    b.Property<string>("Chosen")
+                        .IsRequired()
+                        .HasColumnType("jsonb")
+                        .HasColumnName("chosen");
+
+                    b.Property<bool>("NeedsSecond")
+                        .HasColumnType("boolean")
+                        .HasColumnName("needs_second");
+
+                    b.Property<string>("Reason")
+                        .IsRequired()
+                        .HasColumnType("text")
+                        .HasColumnName("reason");
+
+                    b.HasKey("UnitId", "Id")
+                        .HasName("pk_threshold_version");
+
+                    b.HasIndex("UnitId", "At")
+                        .HasDatabaseName("ix_threshold_version_unit_id_at");
+
+                    b.ToTable("threshold_version", (string)null);
+                });
+
             modelBuilder.Entity("UnitVent.Store.Model.UnitLookupRow", b =>
                 {
                     b.Property<Guid>("Id")
@@ -1297,6 +1376,26 @@ namespace UnitVent.Store.Schema.Migrations
                         .OnDelete(DeleteBehavior.Restrict)
                         .IsRequired()
                         .HasConstraintName("fk_strike_out_entry_unit_id_entry_id");
+                });
+
+            modelBuilder.Entity("UnitVent.Store.Model.ThresholdAnswerRow", b =>
+                {
+                    b.HasOne("UnitVent.Store.Model.ThresholdVersionRow", null)
+                        .WithMany()
+                        .HasForeignKey("UnitId", "VersionId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired()
+                        .HasConstraintName("fk_threshold_answer_threshold_version_unit_id_version_id");
+                });
+
+            modelBuilder.Entity("UnitVent.Store.Model.ThresholdVersionRow", b =>
+                {
+                    b.HasOne("UnitVent.Store.Model.UnitRow", null)
+                        .WithMany()
+                        .HasForeignKey("UnitId")
+                        .OnDelete(DeleteBehavior.Restrict)
+                        .IsRequired()
+                        .HasConstraintName("fk_threshold_version_units_unit_id");
                 });
 #pragma warning restore 612, 618
         }
