@@ -9,7 +9,7 @@ public sealed class EquationConventionTests
     private static readonly double[] Awkward = [double.NaN, double.PositiveInfinity, double.NegativeInfinity, 0, 1, -1, 0.5, double.MaxValue, double.Epsilon];
 
     /// <summary>For every type an equation takes: its whole range, its ends, and the default that no one recorded.</summary>
-    private static readonly Dictionary<Type, Gen<object>> Arguments = new()
+    private static Dictionary<Type, Gen<object>> Arguments => new()
     {
         [typeof(double)] = Gen.OneOf<double>(Gen.OneOf<double>(Awkward), Gen.Double[-10, 200]).Select(x => (object)x),
         [typeof(AirwayPressure)] = Range(-20, 150, AirwayPressure.FromCmH2O),

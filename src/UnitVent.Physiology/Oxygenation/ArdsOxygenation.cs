@@ -10,7 +10,7 @@ public static class ArdsOxygenation
     private const double LowAltitudeMetres = 1000;
     private const double HighestPfMmHg = 6000; // beyond what tension and oxygen fraction can make it
 
-    private static readonly BarometricPressure LowAltitude = BarometricPressure.FromAltitude(LowAltitudeMetres);
+    private static BarometricPressure LowAltitude => BarometricPressure.FromAltitude(LowAltitudeMetres);
 
     /// <summary>Classifies by P/F: mild above 200 to 300 mmHg, moderate above 100 to 200, severe to 100.</summary>
     /// <remarks>Source: ARDS Definition Task Force, JAMA 2012;307:2526-2533; scaled where the pressure is below that of 1000 m

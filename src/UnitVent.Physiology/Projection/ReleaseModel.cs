@@ -3,8 +3,6 @@ namespace UnitVent.Physiology;
 /// <summary>The one-compartment lung that explains the present releases and is asked about the planned ones.</summary>
 internal sealed class ReleaseModel
 {
-    private static readonly Compliance One = Compliance.FromMlPerCmH2O(1);
-
     private readonly bool refillsIncompletely;
 
     public ReleaseModel(ReleaseReading present, AprvSettings planned)
@@ -18,6 +16,8 @@ internal sealed class ReleaseModel
 
     /// <summary>Gets the compliance; not limited to what a <see cref="Compliance"/> holds.</summary>
     public double MlPerCmH2O { get; }
+
+    private static Compliance One => Compliance.FromMlPerCmH2O(1);
 
     public GasVolume Volume(AprvSettings settings) => GasVolume.FromMillilitres(MlPerCmH2O * SwingCmH2O(settings));
 

@@ -8,11 +8,11 @@ namespace UnitVent.Physiology.Tests;
 public sealed class AprvProjectionTests
 {
     /// <summary>28/0 cmH2O, 4.5/0.5 s, ratio 0.60, 420 mL, PaCO2 50, dead space 150 mL, own 2.0 L/min at 10/min.</summary>
-    private static readonly ReleaseReading Base = new(
+    private static ReleaseReading Base => new(
         new(CmH2O(28), CmH2O(0), Seconds(4.5), Seconds(0.5)), 0.60, Ml(420), MmHg(50), Ml(150), LMin(2), PerMin(10));
 
     /// <summary>What is changed in the base, and every reason that must come of it.</summary>
-    private static readonly Dictionary<string, Case> Refused = new()
+    private static Dictionary<string, Case> Refused => new()
     {
         ["released too long"] = new(Base with { TerminationRatio = 0.049 }, Base.Settings, TerminationRatio),
         ["released too short"] = new(Base with { TerminationRatio = 0.901 }, Base.Settings, TerminationRatio),
@@ -39,7 +39,7 @@ public sealed class AprvProjectionTests
     };
 
     /// <summary>The same limits from inside.</summary>
-    private static readonly Dictionary<string, Case> Accepted = new()
+    private static Dictionary<string, Case> Accepted => new()
     {
         ["ratio 0.05 itself"] = new(Base with { TerminationRatio = 0.05 }, Base.Settings),
         ["ratio 0.90 itself"] = new(Base with { TerminationRatio = 0.90, Volume = Ml(250) }, Base.Settings),

@@ -4,7 +4,7 @@ namespace UnitVent.Physiology.Tests;
 
 public sealed class StepDownScheduleTests
 {
-    private static readonly AprvSettings Start = new(CmH2O(28), CmH2O(0), Seconds(4.5), Seconds(0.5));
+    private static AprvSettings Start => new(CmH2O(28), CmH2O(0), Seconds(4.5), Seconds(0.5));
 
     /// <summary>Worked from the definitions for 2 cmH2O and 1 s a step (common practice): P high, T high, mean pressure, rate.</summary>
     public static TheoryData<double, double, double, double> PublishedTable => new()
