@@ -1,3 +1,4 @@
+using System.Buffers;
 using MathNet.Numerics.Distributions;
 using MathNet.Numerics.Statistics;
 
@@ -33,25 +34,30 @@ public sealed record TheilSen(double SlopePerHour, double Intercept, double Lowe
         ArgumentOutOfRangeException.ThrowIfNotEqual(values.Length, hours.Length);
         Finite.Ensure(hours);
         Finite.Ensure(values);
-        var slopes = Slopes(hours, values);
-        if (slopes.Length == 0)
+        var slopes = ArrayPool<double>.Shared.Rent(hours.Length * (hours.Length - 1) / 2);
+        try
         {
-            return null;
+            var count = Slopes(hours, values, slopes);
+            return count == 0 ? null : Line(hours, values, slopes, count, confidence);
         }
-
-        var slope = ArrayStatistics.MedianInplace(slopes);
-        var (lower, upper) = Ranks(hours, values, slopes.Length, confidence);
-        return new(
-            slope,
-            LevelAtZero(hours, values, slope),
-            ArrayStatistics.OrderStatisticInplace(slopes, lower),
-            ArrayStatistics.OrderStatisticInplace(slopes, upper),
-            lower == 1 && upper == slopes.Length);
+        finally
+        {
+            ArrayPool<double>.Shared.Return(slopes);
+        }
     }
 
-    private static double[] Slopes(ReadOnlySpan<double> hours, ReadOnlySpan<double> values)
+    private static TheilSen Line(ReadOnlySpan<double> hours, ReadOnlySpan<double> values, double[] slopes, int count, double confidence)
     {
-        var slopes = new double[hours.Length * (hours.Length - 1) / 2];
+        var slope = (Ranked((count + 1) / 2) + Ranked((count + 2) / 2)) / 2;
+        var (lower, upper) = Ranks(hours, values, count, confidence);
+        return new(slope, LevelAtZero(hours, values, slope), Ranked(lower), Ranked(upper), lower == 1 && upper == count);
+
+        double Ranked(int rank) => ArrayStatistics.OrderStatisticInplace(slopes, rank);
+    }
+
+    /// <summary>Fills in the slopes and says how many there are; what is left of the room is above them all.</summary>
+    private static int Slopes(ReadOnlySpan<double> hours, ReadOnlySpan<double> values, double[] slopes)
+    {
         var count = 0;
         for (var i = 0; i < hours.Length; i++)
         {
@@ -64,7 +70,8 @@ public sealed record TheilSen(double SlopePerHour, double Intercept, double Lowe
             }
         }
 
-        return count == slopes.Length ? slopes : slopes[..count];
+        slopes.AsSpan(count).Fill(double.PositiveInfinity);
+        return count;
     }
 
     private static double LevelAtZero(ReadOnlySpan<double> hours, ReadOnlySpan<double> values, double slope)
