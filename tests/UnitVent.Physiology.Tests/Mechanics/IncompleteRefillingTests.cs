@@ -35,10 +35,12 @@ public sealed class IncompleteRefillingTests
             (Volume(10, step, timeHigh, timeLow, tau, tau) / 10) + Trapped(step, timeHigh, timeLow, tau, tau) <= step + 1e-9);
 
     [Theory]
-    [InlineData(3.99, true)]
-    [InlineData(4, false)]
-    public void Needed_AroundFourTimeConstants_IsTrueBelow(double timeHigh, bool expected)
-        => Assert.Equal(expected, IncompleteRefilling.Needed(Seconds(timeHigh), Seconds(1)));
+    [InlineData(3.99, 1, true)]
+    [InlineData(4, 1, false)]
+    [InlineData(7.99, 2, true)]
+    [InlineData(8, 2, false)]
+    public void Needed_AroundFourTimeConstants_IsTrueBelow(double timeHigh, double tau, bool expected)
+        => Assert.Equal(expected, IncompleteRefilling.Needed(Seconds(timeHigh), Seconds(tau)));
 
     [Theory]
     [InlineData(0, 4, 0.5, 1, 1)]

@@ -27,7 +27,7 @@ public sealed class AprvProjectionTests
             Base with { TerminationRatio = 0.95, OwnRate = default }, Planned(high: 40, timeLow: 1), TerminationRatio, OwnRate, PressureStep, TimeLow),
         ["4.9 mL/cmH2O"] = new(Base with { Volume = Ml(55), DeadSpace = Ml(10) }, Base.Settings, ProjectionRefusal.Compliance),
         ["150.1 mL/cmH2O"] = new(Base with { Volume = Ml(1681) }, Base.Settings, ProjectionRefusal.Compliance),
-        ["all of the release is dead space now"] = new(Base with { DeadSpace = Ml(420) }, Base.Settings, ProjectionRefusal.DeadSpace),
+        ["all of the release is dead space now"] = new(Base with { DeadSpace = Ml(420) }, Planned(high: 30), ProjectionRefusal.DeadSpace),
         ["all of the release is dead space then"] = new(Base with { DeadSpace = Ml(400) }, Planned(high: 26), ProjectionRefusal.DeadSpace),
         ["fewer than half the releases"] = new(Quiet(), Planned(timeHigh: 9.6), AlveolarVentilation),
         ["more than twice the releases"] = new(Quiet(), Planned(timeHigh: 1.9), AlveolarVentilation),
