@@ -33,8 +33,9 @@ public sealed class FlagDesk
     /// <param name="toldWho">Who was told.</param>
     /// <param name="toldAt">When.</param>
     /// <param name="cancellationToken">Gives up.</param>
+    /// <param name="takeOver">Whether it is taken over from somebody who has it in hand; without it the second of two is told who was first.</param>
     public Task<Result<Flag>> AcknowledgeAsync(
-        Actor actor, Guid flagId, Guid id, string? plan, Instant? until, string? toldWho, Instant? toldAt, CancellationToken cancellationToken) =>
+        Actor actor, Guid flagId, Guid id, string? plan, Instant? until, string? toldWho, Instant? toldAt, CancellationToken cancellationToken, bool takeOver = false) =>
         scope.WithAsync(
             actor,
             flagId,
@@ -50,7 +51,7 @@ public sealed class FlagDesk
                 }
 
                 var (now, flag) = (clock.GetCurrentInstant(), row.ToFlag());
-                if (Refused(flag, until, now) is { } refused)
+                if ((Refused(flag, until, now) ?? (takeOver ? null : TakenBy(flag, actor, now))) is { } refused)
                 {
                     return refused;
                 }
@@ -73,6 +74,11 @@ public sealed class FlagDesk
         && JsonSerializer.Deserialize<Acknowledgement>(text, ChartJson.Options)! is var hand
         && (hand.Plan, hand.ToldWho, hand.ToldAt) == (plan, toldWho, toldAt)
         && hand.Until == (until ?? hand.At + UrgentAtMost);
+
+    private static Result<Flag>? TakenBy(Flag flag, Actor actor, Instant now) =>
+        flag.InHand is { } hand && hand.Until > now && hand.By != actor.Name
+            ? Result<Flag>.Refused(Refusal.Conflict, "", "flag.inHand", $"{hand.By} took it in hand {(now - hand.At).TotalMinutes:0} min ago.")
+            : null;
 
     private static Result<Flag>? Refused(Flag flag, Instant? until, Instant now)
     {

@@ -45,7 +45,7 @@ public static class FlagEndpoints
         }
 
         var ((write, told), form) = (sent.Value, (AcknowledgeForm)sent.Value.Sent.Body);
-        var flag = await desk.AcknowledgeAsync(http.Actor(), id, write.Id, form.Plan, form.Until, told.Who, told.At, cancel);
+        var flag = await desk.AcknowledgeAsync(http.Actor(), id, write.Id, form.Plan, form.Until, told.Who, told.At, cancel, form.TakeOver == true);
         return flag.Succeeded ? TypedResults.Ok(FlagBody.Of(flag.Value)) : Problems.Of(flag);
     }
 
@@ -71,6 +71,9 @@ public sealed record AcknowledgeForm
 
     [Field("Until")]
     public Instant? Until { get; init; }
+
+    [Field("Take over")]
+    public bool? TakeOver { get; init; }
 }
 
 /// <summary>Who was told, and when.</summary>

@@ -18,8 +18,8 @@ public sealed partial class CardList
 
     private string Time(Instant at) => Format.Time(at, Now, Zone);
 
-    /// <summary>Takes every flag of the card that nobody has in hand.</summary>
-    private async Task TakeAsync(Card card, string? words, TypedTime? time)
+    /// <summary>Takes every flag of the card that nobody has in hand; all of them when it is taken over.</summary>
+    private async Task TakeAsync(Card card, string? words, TypedTime? time, bool over = false)
     {
         if (time?.Problem is { } problem)
         {
@@ -29,14 +29,16 @@ public sealed partial class CardList
 
         busy = card.Family;
         refused = "";
-        foreach (var flag in card.Flags.Where(f => f.InHand is null))
+        foreach (var flag in card.Flags.Where(f => over || f.InHand is null))
         {
             var taken = await Me.DoAsync(actor => Desk.AcknowledgeAsync(
-                actor, flag.Id, Guid.CreateVersion7(), string.IsNullOrWhiteSpace(words) ? null : words.Trim(), time?.At, null, null, CancellationToken.None));
+                actor, flag.Id, Guid.CreateVersion7(), Written(words), time?.At, Written(told), Written(told) is null ? null : Now, CancellationToken.None, over));
             refused = taken.Succeeded ? refused : string.Join(" ", taken.Errors.Select(e => e.Message));
         }
 
-        (busy, plan, until) = (null, "", "");
+        (busy, plan, until, told) = (null, "", "", "");
         await Taken.InvokeAsync();
     }
+
+    private static string? Written(string? words) => string.IsNullOrWhiteSpace(words) ? null : words.Trim();
 }

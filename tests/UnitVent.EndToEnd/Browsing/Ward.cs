@@ -10,7 +10,7 @@ using UnitVent.Testing;
 
 namespace UnitVent.EndToEnd.Browsing;
 
-/// <summary>A unit with beds and a physician, served by the program from a database of its own. One a test class.</summary>
+/// <summary>A unit with beds, a physician and a charge therapist, served by the program from a database of its own. One a test class.</summary>
 public sealed class Ward(Chromium chromium) : IAsyncLifetime
 {
     public const string Code = "ICU";
@@ -33,12 +33,9 @@ public sealed class Ward(Chromium chromium) : IAsyncLifetime
         program = await ServedProgram.StartAsync(folder, new ServedProgram.Connections(Through(database.OwnerConnectionString), Through(database.RuntimeConnectionString)));
     }
 
-    public async Task<Screen> PhysicianAsync(BrowserNewContextOptions? options = null)
-    {
-        var screen = await Screen.OpenAsync(chromium.Browser, Address, options);
-        await screen.SignInAsync("physician", Password);
-        return screen;
-    }
+    public Task<Screen> PhysicianAsync(BrowserNewContextOptions? options = null) => SignedInAsync("physician", options);
+
+    public Task<Screen> ChargeTherapistAsync() => SignedInAsync("charge", null);
 
     public Task<Screen> NobodyAsync() => Screen.OpenAsync(chromium.Browser, Address);
 
@@ -65,10 +62,20 @@ public sealed class Ward(Chromium chromium) : IAsyncLifetime
         var unit = await desks.GetRequiredService<UnitDesk>().CreateAsync(UserDesk.CommandLine, new NewUnit(Code, "Test unit", "Etc/UTC", ["1", "2", "3", "4"]), CancellationToken.None);
         Assert.True(unit.Succeeded, string.Join(' ', unit.Errors));
         var users = desks.GetRequiredService<UserDesk>();
-        var person = await users.CreateAsync(UserDesk.CommandLine, "physician", "P. Physician", Password, false, CancellationToken.None);
-        Assert.True(person.Succeeded, string.Join(' ', person.Errors));
-        var member = await users.SetMembershipAsync(UserDesk.CommandLine, person.Value.Id, Code, UnitRole.Physician, CancellationToken.None);
-        Assert.True(member.Succeeded, string.Join(' ', member.Errors));
+        foreach (var (userName, name, role) in new[] { ("physician", "P. Physician", UnitRole.Physician), ("charge", "C. Charge", UnitRole.ChargeTherapist) })
+        {
+            var person = await users.CreateAsync(UserDesk.CommandLine, userName, name, Password, false, CancellationToken.None);
+            Assert.True(person.Succeeded, string.Join(' ', person.Errors));
+            var member = await users.SetMembershipAsync(UserDesk.CommandLine, person.Value.Id, Code, role, CancellationToken.None);
+            Assert.True(member.Succeeded, string.Join(' ', member.Errors));
+        }
+    }
+
+    private async Task<Screen> SignedInAsync(string userName, BrowserNewContextOptions? options)
+    {
+        var screen = await Screen.OpenAsync(chromium.Browser, Address, options);
+        await screen.SignInAsync(userName, Password);
+        return screen;
     }
 
     private string Through(string connectionString) =>

@@ -37,6 +37,9 @@ public sealed class AccessibilityTests(Ward ward) : IClassFixture<Ward>
             await Expect(drawer).ToBeHiddenAsync();
         }
 
+        await page.GetByRole(AriaRole.Link, new() { Name = "Rules", Exact = true }).ClickAsync();
+        await page.Locator("details.rule summary").First.ClickAsync();
+        await CleanAsync(page, "rules");
         await page.GetByRole(AriaRole.Link, new() { Name = "Board" }).ClickAsync();
         await page.GetByRole(AriaRole.Button, new() { Name = "Open bed " + bed, Exact = true }).ClickAsync();
         await Expect(page.GetByTestId("details-" + bed)).ToBeVisibleAsync();

@@ -51,6 +51,20 @@ public sealed class FlagDeskTests(TestStore store) : IClassFixture<TestStore>
     }
 
     [Fact]
+    public async Task Acknowledge_ByTwoAtOnce_OneWins_AndTheOtherIsToldWho()
+    {
+        var flag = await CautionAsync("5");
+        Task<Result<Flag>> Take(string name, bool over = false) =>
+            store.Get<FlagDesk>().AcknowledgeAsync(store.With(UnitRole.Therapist, name), flag.Id, Guid.CreateVersion7(), null, null, null, null, TestStore.Cancel, over);
+
+        var both = await Task.WhenAll(Take("Anna"), Take("Berta"));
+
+        var (won, lost) = (both.Single(r => r.Succeeded).Value.InHand!.By, both.Single(r => !r.Succeeded));
+        Assert.Equal((Refusal.Conflict, $"{won} took it in hand 0 min ago."), (lost.Refusal, lost.Errors.Single().Message));
+        Assert.Equal("Clara", TestStore.Value(await Take("Clara", over: true)).InHand!.By);
+    }
+
+    [Fact]
     public async Task Acknowledge_ByANurse_IsDenied_AndByAStranger_NotFound()
     {
         var flag = await CautionAsync("4");
