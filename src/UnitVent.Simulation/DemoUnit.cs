@@ -1,6 +1,7 @@
 using NodaTime;
 using UnitVent.Physiology;
 using UnitVent.Simulation.Demo;
+using UnitVent.Simulation.Lung;
 using UnitVent.Simulation.Randomness;
 
 namespace UnitVent.Simulation;
@@ -33,6 +34,9 @@ public static class DemoUnit
         var from = Instant.Max(start, until - Longest);
         return new SimulatedUnit(
             unit.Code, unit.Name, unit.TimeZone, unit.AltitudeM, unit.Beds,
-            [.. DemoFiles.Patients(seedFolder).Select(s => new EpisodeTeller(s, random.For(s.Patient.Mrn), barometric, start).Tell(from, until))]);
+            [.. DemoFiles.Patients(seedFolder).Select(s => Teller(s, random.For(s.Patient.Mrn), barometric, start).Tell(from, until))]);
     }
+
+    private static EpisodeTeller Teller(Scenario scenario, KeyedRandom random, BarometricPressure barometric, Instant start) =>
+        new(scenario, random, barometric, start, new Plan(scenario, random).Until, new Unrest(random.For("unrest")).Of);
 }

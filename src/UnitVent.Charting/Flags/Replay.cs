@@ -16,7 +16,13 @@ public static class Replay
     /// <param name="whole">The chart with all of its entries, not only those of the last 48 h.</param>
     /// <param name="from">Where it begins; entries recorded before are known from there on.</param>
     /// <param name="to">Where it ends.</param>
-    public static IEnumerable<ReplayedStep> Run(ChartWindow whole, Instant from, Instant to)
+    public static IEnumerable<ReplayedStep> Run(ChartWindow whole, Instant from, Instant to) => Moments(whole, from, to).SelectMany(m => m.Steps);
+
+    /// <summary>The same, moment by moment: each recording, and each instant at which time alone changes anything.</summary>
+    /// <param name="whole">The chart with all of its entries, not only those of the last 48 h.</param>
+    /// <param name="from">Where it begins; entries recorded before are known from there on.</param>
+    /// <param name="to">Where it ends.</param>
+    public static IEnumerable<ReplayedMoment> Moments(ChartWindow whole, Instant from, Instant to)
     {
         ArgumentNullException.ThrowIfNull(whole);
         var recorded = whole.Standing.Select(e => e.RecordedAt).Where(r => r > from && r <= to).Distinct().Order().Append(to).ToList();
@@ -26,18 +32,8 @@ public static class Replay
             for (Instant? moment = at; moment < next || moment == to;)
             {
                 var picture = PatientPicture.At(Known(whole, moment.Value), moment.Value);
-                foreach (var step in FlagLedger.Next([.. flags.Values], picture, Guid.CreateVersion7))
-                {
-                    var flag = FlagLedger.Apply(flags.GetValueOrDefault(step.FlagId), step, whole.Episode.Id, moment.Value);
-                    flags[step.FlagId] = flag;
-                    if (flag.State != FlagState.Open)
-                    {
-                        flags.Remove(step.FlagId);
-                    }
-
-                    yield return new(moment.Value, step, [.. flags.Values]);
-                }
-
+                var steps = FlagLedger.Next([.. flags.Values], picture, Guid.CreateVersion7).Select(step => Take(step, flags, whole, moment.Value)).ToList();
+                yield return new(picture, steps, [.. flags.Values]);
                 moment = moment == to ? null : picture.NextChangeAt;
             }
 
@@ -60,6 +56,18 @@ public static class Replay
                 .Concat(before.Where(e => !States.Contains(e.Kind)).GroupBy(e => e.Kind).Select(g => g.Last())),
             whole.FollowUpSteps);
     }
+
+    private static ReplayedStep Take(FlagStep step, Dictionary<Guid, Flag> flags, ChartWindow whole, Instant at)
+    {
+        var flag = FlagLedger.Apply(flags.GetValueOrDefault(step.FlagId), step, whole.Episode.Id, at);
+        flags[step.FlagId] = flag;
+        if (flag.State != FlagState.Open)
+        {
+            flags.Remove(step.FlagId);
+        }
+
+        return new(at, step, [.. flags.Values]);
+    }
 }
 
 /// <summary>One step of a replayed flag.</summary>
@@ -67,3 +75,9 @@ public static class Replay
 /// <param name="Step">What happened.</param>
 /// <param name="Open">The flags that were open after it.</param>
 public sealed record ReplayedStep(Instant At, FlagStep Step, IReadOnlyList<Flag> Open);
+
+/// <summary>One moment of a replay.</summary>
+/// <param name="Picture">The picture of that moment.</param>
+/// <param name="Steps">What happened to the flags, in order; empty when nothing did.</param>
+/// <param name="Open">The flags that were open after it.</param>
+public sealed record ReplayedMoment(PatientPicture Picture, IReadOnlyList<ReplayedStep> Steps, IReadOnlyList<Flag> Open);

@@ -16,15 +16,25 @@ internal sealed class EpisodeTeller
     private readonly KeyedRandom random;
     private readonly Instant start;
     private readonly BedsideStaff staff;
-    private readonly Unrest unrest;
+    private readonly Func<int, IReadOnlyList<PlannedMoment>> planUntil;
+    private readonly Func<PatientParameters, double, PatientParameters> unrest;
     private readonly VentilatedPatient patient;
     private int minute;
 
-    public EpisodeTeller(Scenario scenario, KeyedRandom random, BarometricPressure barometric, Instant start)
+    /// <summary>Draws up a telling.</summary>
+    /// <param name="scenario">The story.</param>
+    /// <param name="random">The patient's own random numbers.</param>
+    /// <param name="barometric">Around the bed.</param>
+    /// <param name="start">When the story begins.</param>
+    /// <param name="planUntil">When the staff comes, up to a minute.</param>
+    /// <param name="unrest">What the slow wander makes of calm parameters at an hour; asked in order of time.</param>
+    public EpisodeTeller(
+        Scenario scenario, KeyedRandom random, BarometricPressure barometric, Instant start,
+        Func<int, IReadOnlyList<PlannedMoment>> planUntil, Func<PatientParameters, double, PatientParameters> unrest)
     {
         (this.scenario, this.random, this.start) = (scenario, random, start);
         staff = new BedsideStaff(scenario, random);
-        unrest = new Unrest(random.For("unrest"));
+        (this.planUntil, this.unrest) = (planUntil, unrest);
         var first = scenario.Script.Where(s => s.Kind == EntryKind.SettingChange).MinBy(s => s.Minute)!;
         patient = new VentilatedPatient(ParametersNow(), (SettingChange)first.EntryAt(start), barometric);
     }
@@ -34,7 +44,7 @@ internal sealed class EpisodeTeller
     {
         var kept = new List<SimulatedAction>();
         SimulatedAction? inForceBefore = null;
-        foreach (var planned in new Plan(scenario, random).Until((int)(until - start).TotalMinutes))
+        foreach (var planned in planUntil((int)(until - start).TotalMinutes))
         {
             LiveUntil(planned.Minute);
             var at = start + Duration.FromMinutes(minute);
@@ -87,6 +97,6 @@ internal sealed class EpisodeTeller
     private PatientParameters ParametersNow()
     {
         var hour = minute / 60.0;
-        return unrest.Of(scenario.Course.At(scenario.Lung, scenario.Repeat.StoryHour(hour)), hour);
+        return unrest(scenario.Course.At(scenario.Lung, scenario.Repeat.StoryHour(hour)), hour);
     }
 }

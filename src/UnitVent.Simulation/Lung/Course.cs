@@ -5,6 +5,8 @@ public sealed record Course
 {
     public IReadOnlyList<Keyframe>? ComplianceMlPerCmH2O { get; init; }
 
+    public IReadOnlyList<Keyframe>? InspiratoryResistanceCmH2OSPerL { get; init; }
+
     public IReadOnlyList<Keyframe>? ExpiratoryResistanceCmH2OSPerL { get; init; }
 
     public IReadOnlyList<Keyframe>? ShuntFraction { get; init; }
@@ -23,8 +25,8 @@ public sealed record Course
 
     public IEnumerable<IReadOnlyList<Keyframe>> Tracks() => new[]
     {
-        ComplianceMlPerCmH2O, ExpiratoryResistanceCmH2OSPerL, ShuntFraction, CarbonDioxideOutputMlMin, StandardBaseExcessMmolL,
-        Drive, OwnVolumeMl, MeanArterialPressureMmHg, Rass,
+        ComplianceMlPerCmH2O, InspiratoryResistanceCmH2OSPerL, ExpiratoryResistanceCmH2OSPerL, ShuntFraction, CarbonDioxideOutputMlMin,
+        StandardBaseExcessMmolL, Drive, OwnVolumeMl, MeanArterialPressureMmHg, Rass,
     }.OfType<IReadOnlyList<Keyframe>>();
 
     public PatientParameters At(PatientParameters start, double hour)
@@ -32,6 +34,7 @@ public sealed record Course
         return start with
         {
             ComplianceMlPerCmH2O = Value(ComplianceMlPerCmH2O, start.ComplianceMlPerCmH2O),
+            InspiratoryResistanceCmH2OSPerL = Value(InspiratoryResistanceCmH2OSPerL, start.InspiratoryResistanceCmH2OSPerL),
             ExpiratoryResistanceCmH2OSPerL = Value(ExpiratoryResistanceCmH2OSPerL, start.ExpiratoryResistanceCmH2OSPerL),
             ShuntFraction = Value(ShuntFraction, start.ShuntFraction),
             CarbonDioxideOutputMlMin = Value(CarbonDioxideOutputMlMin, start.CarbonDioxideOutputMlMin),

@@ -5,7 +5,9 @@ namespace UnitVent.Simulation.Randomness;
 public readonly record struct KeyedRandom(ulong Seed)
 {
     private const ulong Golden = 0x9E3779B97F4A7C15;
-    private const double LargestDeviations = 2.5; // a reading further out is repeated before it is charted
+
+    /// <summary>Where normal numbers are cut, in deviations: a reading further out is repeated before it is charted.</summary>
+    public double LargestDeviation { get; init; } = 2.5;
 
     /// <summary>An independent source for a part of the simulation.</summary>
     public KeyedRandom For(string name)
@@ -18,12 +20,12 @@ public readonly record struct KeyedRandom(ulong Seed)
                 hash = Mix(hash + Golden + character);
             }
 
-            return new KeyedRandom(hash);
+            return this with { Seed = hash };
         }
     }
 
     /// <summary>An independent source for a numbered part of the simulation.</summary>
-    public KeyedRandom For(long index) => new(Bits(index));
+    public KeyedRandom For(long index) => this with { Seed = Bits(index) };
 
     public ulong Bits(long index)
     {
@@ -36,12 +38,12 @@ public readonly record struct KeyedRandom(ulong Seed)
     /// <summary>Evenly spread in [0, 1).</summary>
     public double Uniform(long index) => (Bits(index) >> 11) * (1.0 / (1UL << 53));
 
-    /// <summary>Normally distributed with mean 0 and deviation 1, cut at 2.5 deviations.</summary>
+    /// <summary>Normally distributed with mean 0 and deviation 1, cut at <see cref="LargestDeviation"/>.</summary>
     public double Normal(long index)
     {
         var pair = For(index);
         var radius = Math.Sqrt(-2 * Math.Log(1 - pair.Uniform(0)));
-        return Math.Clamp(radius * Math.Cos(2 * Math.PI * pair.Uniform(1)), -LargestDeviations, LargestDeviations);
+        return Math.Clamp(radius * Math.Cos(2 * Math.PI * pair.Uniform(1)), -LargestDeviation, LargestDeviation);
     }
 
     private static ulong Mix(ulong z)
