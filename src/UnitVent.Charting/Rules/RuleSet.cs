@@ -1,3 +1,4 @@
+using UnitVent.Charting.Rules.CarbonDioxide;
 using UnitVent.Charting.Rules.Collapse;
 using UnitVent.Charting.Rules.Due;
 using UnitVent.Charting.Rules.Oxygen;
@@ -16,12 +17,22 @@ public static class RuleSet
     [
         new ReleasedLongRule(),
         new ReleaseVolumeHighRule(),
+        new MeanPressuresDifferRule(),
         new GasDoesNotFitRule(),
+        new OxygenDoesNotFitRule(),
         new NotKnownRule(),
+        new VolumesDoNotAddUpRule(),
+        new CarbonDioxideRisingRule(),
+        new PHRule(),
+        new PaCO2Rule(),
         new OxygenationWorseRule(),
         new LowOxygenRule(),
+        new OxygenAboveTargetRule(),
         new CheckDueRule(),
+        new CreepingFiO2Rule(),
         new SuddenChangeRule(),
+        new VenousPHRule(),
+        new SaturationFallingRule(),
     ];
 
     /// <summary>The rule with an id.</summary>

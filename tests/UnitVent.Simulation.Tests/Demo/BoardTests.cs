@@ -11,7 +11,8 @@ public sealed class BoardTests
     public static TheoryData<string, Band, string, string> Intended => new()
     {
         { "1", Band.LookThisHour, "R01", "released long" },
-        { "2", Band.LookThisHour, "R24", "oxygenation worse at equal mean pressure" },
+        { "2", Band.LookThisHour, "R24 R58", "oxygenation worse at equal mean pressure" },
+        { "3", Band.LookThisHour, "R21", "own breaths fall away" },
         { "7", Band.LookThisHour, "R14", "gas does not fit itself" },
         { "8", Band.NotKnown, "", "typed late" },
         { "4", Band.NothingRaised, "", "weaning well" },
