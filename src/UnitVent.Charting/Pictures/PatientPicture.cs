@@ -106,6 +106,9 @@ public sealed class PatientPicture
     /// <summary>Gets what drifts, over the unit's window within the present epoch. Computed when first asked for.</summary>
     public PatientDrifts Drifts => field ??= PatientDrifts.Of(this);
 
+    /// <summary>Gets the valid points behind drifts. Computed when first asked for.</summary>
+    internal EpochSeries Series => field ??= new EpochSeries(this);
+
     /// <summary>Gets the value with a name.</summary>
     /// <exception cref="KeyNotFoundException">There is no such value.</exception>
     public PictureValue this[string name] => Values[name];

@@ -19,6 +19,9 @@ internal static class ReleaseChecks
             ? 100 * ReleaseTermination.Ratio(GasFlow.FromLitresPerMinute((double)peak), GasFlow.FromLitresPerMinute((double)end))
             : null;
 
+    /// <summary>Whether the flows of a check were read from one release, or nobody says from how many.</summary>
+    public static bool AreFew(VentilatorCheck check) => (check.FlowReadings ?? check.ReleasesAveraged ?? 1) < 2;
+
     /// <summary>Why the mechanics of a check are not valid; null when they are.</summary>
     public static string? NotValid(PatientPicture picture, Charted<VentilatorCheck> check) => NotValid(check.Body, picture.Has(Circumstance.AirLeak));
 

@@ -1,5 +1,7 @@
+using UnitVent.Charting.Rules.Airway;
 using UnitVent.Charting.Rules.CarbonDioxide;
 using UnitVent.Charting.Rules.Collapse;
+using UnitVent.Charting.Rules.Drive;
 using UnitVent.Charting.Rules.Due;
 using UnitVent.Charting.Rules.Oxygen;
 using UnitVent.Charting.Rules.Slips;
@@ -16,23 +18,37 @@ public static class RuleSet
     public static IReadOnlyList<Rule> All { get; } =
     [
         new ReleasedLongRule(),
+        new ReleasedShortRule(),
+        new TimeLowRule(),
         new ReleaseVolumeHighRule(),
+        new ReleaseVolumeLowRule(),
+        new ReleaseRateRule(),
+        new ShareAtPHighRule(),
+        new ComplianceFallingRule(),
+        new PressureLowHoldsRule(),
         new MeanPressuresDifferRule(),
         new GasDoesNotFitRule(),
         new OxygenDoesNotFitRule(),
         new NotKnownRule(),
         new VolumesDoNotAddUpRule(),
+        new OwnShareLowRule(),
+        new RelaxantBegunRule(),
         new CarbonDioxideRisingRule(),
         new PHRule(),
         new PaCO2Rule(),
         new OxygenationWorseRule(),
         new LowOxygenRule(),
         new OxygenAboveTargetRule(),
+        new DeepSedationRule(),
         new CheckDueRule(),
+        new MeanPressureFellRule(),
+        new MinuteVolumeFellRule(),
+        new OxygenFellAfterPressureRule(),
         new CreepingFiO2Rule(),
         new SuddenChangeRule(),
         new VenousPHRule(),
         new SaturationFallingRule(),
+        new TimeConstantRisingRule(),
     ];
 
     /// <summary>The rule with an id.</summary>

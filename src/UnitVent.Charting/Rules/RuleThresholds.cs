@@ -7,9 +7,37 @@ public sealed record RuleThresholds
     [OfRule("R01")]
     public Timing.ReleasedLongOptions ReleasedLong { get; init; } = new();
 
+    /// <summary>Gets R02's thresholds.</summary>
+    [OfRule("R02")]
+    public Timing.ReleasedShortOptions ReleasedShort { get; init; } = new();
+
+    /// <summary>Gets R03's thresholds.</summary>
+    [OfRule("R03")]
+    public Timing.TimeLowOptions TimeLow { get; init; } = new();
+
     /// <summary>Gets R04's thresholds.</summary>
     [OfRule("R04")]
     public Volumes.ReleaseVolumeHighOptions ReleaseVolumeHigh { get; init; } = new();
+
+    /// <summary>Gets R05's thresholds.</summary>
+    [OfRule("R05")]
+    public Collapse.ReleaseVolumeLowOptions ReleaseVolumeLow { get; init; } = new();
+
+    /// <summary>Gets R07's thresholds.</summary>
+    [OfRule("R07")]
+    public Timing.ReleaseRateOptions ReleaseRate { get; init; } = new();
+
+    /// <summary>Gets R08's thresholds.</summary>
+    [OfRule("R08")]
+    public Timing.ShareAtPHighOptions ShareAtPHigh { get; init; } = new();
+
+    /// <summary>Gets R09's thresholds.</summary>
+    [OfRule("R09")]
+    public Collapse.ComplianceFallingOptions ComplianceFalling { get; init; } = new();
+
+    /// <summary>Gets R11's thresholds.</summary>
+    [OfRule("R11")]
+    public Timing.PressureLowHoldsOptions PressureLowHolds { get; init; } = new();
 
     /// <summary>Gets R13's thresholds.</summary>
     [OfRule("R13")]
@@ -22,6 +50,14 @@ public sealed record RuleThresholds
     /// <summary>Gets R18's thresholds.</summary>
     [OfRule("R18")]
     public Slips.VolumesDoNotAddUpOptions VolumesDoNotAddUp { get; init; } = new();
+
+    /// <summary>Gets R19a's thresholds.</summary>
+    [OfRule("R19a")]
+    public Drive.OwnShareLowOptions OwnShareLow { get; init; } = new();
+
+    /// <summary>Gets R20's thresholds.</summary>
+    [OfRule("R20")]
+    public Drive.RelaxantBegunOptions RelaxantBegun { get; init; } = new();
 
     /// <summary>Gets R21's thresholds.</summary>
     [OfRule("R21")]
@@ -47,9 +83,25 @@ public sealed record RuleThresholds
     [OfRule("R26")]
     public Oxygen.OxygenAboveTargetOptions OxygenAboveTarget { get; init; } = new();
 
+    /// <summary>Gets R30's thresholds.</summary>
+    [OfRule("R30")]
+    public Drive.DeepSedationOptions DeepSedation { get; init; } = new();
+
     /// <summary>Gets R32's thresholds.</summary>
     [OfRule("R32")]
     public Due.CheckDueOptions CheckDue { get; init; } = new();
+
+    /// <summary>Gets R34's thresholds.</summary>
+    [OfRule("R34")]
+    public Collapse.MeanPressureFellOptions MeanPressureFell { get; init; } = new();
+
+    /// <summary>Gets R53's thresholds.</summary>
+    [OfRule("R53")]
+    public Drive.MinuteVolumeFellOptions MinuteVolumeFell { get; init; } = new();
+
+    /// <summary>Gets R54's thresholds.</summary>
+    [OfRule("R54")]
+    public Collapse.OxygenFellAfterPressureOptions OxygenFellAfterPressure { get; init; } = new();
 
     /// <summary>Gets R55's thresholds.</summary>
     [OfRule("R55")]
@@ -62,6 +114,10 @@ public sealed record RuleThresholds
     /// <summary>Gets R57's thresholds.</summary>
     [OfRule("R57")]
     public CarbonDioxide.VenousPHOptions VenousPH { get; init; } = new();
+
+    /// <summary>Gets R59's thresholds.</summary>
+    [OfRule("R59")]
+    public Airway.TimeConstantRisingOptions TimeConstantRising { get; init; } = new();
 
     /// <summary>The defaults with what a unit chose instead, by <see cref="Threshold.Key"/>; a key that is not known is left out.</summary>
     public static RuleThresholds With(IReadOnlyDictionary<string, double> chosen)

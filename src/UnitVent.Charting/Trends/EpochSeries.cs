@@ -7,23 +7,28 @@ using UnitVent.Charting.Windows;
 
 namespace UnitVent.Charting.Trends;
 
-/// <summary>The valid points of a patient's series since an instant: settled, of the present mode, each computed with what was in force at its own time.</summary>
+/// <summary>The valid points of a patient's series within the unit's window and the present epoch: settled, of the present mode, each computed with what was in force at its own time.</summary>
 internal sealed class EpochSeries
 {
     private readonly ChartWindow window;
     private readonly List<PairedGas> gases;
-    private readonly List<CheckValues> checks;
+    private readonly List<Charted<VentilatorCheck>> valid;
     private readonly Dictionary<Instant, List<PictureValue>> ofGasAt = [];
 
-    public EpochSeries(PatientPicture picture, Instant from)
+    public EpochSeries(PatientPicture picture)
     {
         window = picture.Window;
+        From = Instant.Max(picture.AsOf - window.Unit.DriftWindow, InForce.EpochStart(window, picture.AsOf));
         var mode = picture.Settings?.Body.Mode;
-        gases = [.. picture.Gases.Where(g => g.Gas.At >= from && g.Settings?.Body.Mode == mode && !Settling.IsDisturbed(window, g.Gas.At))];
-        checks = [.. window.Of<VentilatorCheck>(EntryKind.VentilatorCheck, picture.AsOf)
-            .Where(c => c.At >= from && InForce.Settings(window, c.At)?.Body.Mode == mode && !Settling.IsDisturbed(window, c.At))
-            .Select(c => new CheckValues(window, c))];
+        gases = [.. picture.Gases.Where(g => g.Gas.At >= From && g.Settings?.Body.Mode == mode && !Settling.IsDisturbed(window, g.Gas.At))];
+        valid = [.. window.Of<VentilatorCheck>(EntryKind.VentilatorCheck, picture.AsOf)
+            .Where(c => c.At >= From && InForce.Settings(window, c.At)?.Body.Mode == mode && !Settling.IsDisturbed(window, c.At))];
     }
+
+    /// <summary>From when points count: the unit's window ago, or when mode, position, relaxant, ECMO or a drain last changed.</summary>
+    public Instant From { get; }
+
+    private List<CheckValues> Checks => field ??= [.. valid.Select(c => new CheckValues(window, c))];
 
     /// <summary>A value that rests on the oxygen of a gas.</summary>
     public IEnumerable<SeriesPoint> OfOxygen(string name) => Points(gases.Where(g => !g.Unsettled), g => g.Gas.At, g => g.Gas.Id, g => g.Values[name].Value);
@@ -44,7 +49,7 @@ internal sealed class EpochSeries
         : null;
 
     /// <summary>A value of the checks.</summary>
-    public IEnumerable<SeriesPoint> OfChecks(Func<CheckValues, double?> value) => Points(checks, c => c.Check.At, c => c.Check.Id, value);
+    public IEnumerable<SeriesPoint> OfChecks(Func<CheckValues, double?> value) => Points(Checks, c => c.Check.At, c => c.Check.Id, value);
 
     /// <summary>The pulse oximeter's readings; while oxygen settles they are left out.</summary>
     public IEnumerable<SeriesPoint> Saturation() =>
@@ -55,6 +60,13 @@ internal sealed class EpochSeries
         c[name] is { } value && (value.Kind != ValueKind.Estimated || value.State == ValueState.Ok) && ReleaseChecks.NotValid(c.Check.Body, Leaks(c.Check.At)) is null
             ? value.Value
             : null);
+
+    /// <summary>The same, of checks whose end-release flow lies within a range of per cent of peak.</summary>
+    public IEnumerable<SeriesPoint> Mechanics(string name, double endFlowFrom, double endFlowTo)
+    {
+        var within = OfChecks(c => c[ValueNames.EndReleaseFlowPercent]?.Value).Where(p => p.Value >= endFlowFrom && p.Value <= endFlowTo).Select(p => p.Entry).ToHashSet();
+        return Mechanics(name).Where(p => within.Contains(p.Entry));
+    }
 
     private bool Leaks(Instant at) => InForce.Context(window, at).Any(c => c.Body.Flag == Circumstance.AirLeak);
 

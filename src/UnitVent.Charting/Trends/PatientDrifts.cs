@@ -1,7 +1,6 @@
 using NodaTime;
 using UnitVent.Charting.Pictures;
 using UnitVent.Charting.Timelines;
-using UnitVent.Charting.Windows;
 
 namespace UnitVent.Charting.Trends;
 
@@ -26,14 +25,13 @@ public sealed record PatientDrifts(Instant From, Instant To, IReadOnlyList<Drift
     internal static PatientDrifts Of(PatientPicture picture)
     {
         var (window, to) = (picture.Window, picture.AsOf);
-        var from = Instant.Max(to - window.Unit.DriftWindow, InForce.EpochStart(window, to));
-        var series = new EpochSeries(picture, from);
+        var series = picture.Series;
         var alkalaemic = (double?)picture.LatestGas?.Gas.Body.PH > Alkalaemia;
         return new(
-            from,
+            series.From,
             to,
             [.. Gases(series, alkalaemic), .. Checks(series)],
-            [.. TimelineMarks.SettingChanges(window, from, to).Where(c => c.At > from)]);
+            [.. TimelineMarks.SettingChanges(window, series.From, to).Where(c => c.At > series.From)]);
     }
 
     private static IEnumerable<Drift> Gases(EpochSeries series, bool alkalaemic)

@@ -21,6 +21,20 @@ public static class InForce
     /// <summary>The settings in force; null when none were charted by then.</summary>
     public static Charted<SettingChange>? Settings(ChartWindow window, Instant at) => window.Latest<SettingChange>(EntryKind.SettingChange, at);
 
+    /// <summary>Since when what is picked of the settings is as it is at an instant; null when none were charted by then.</summary>
+    public static Instant? UnchangedSince<T>(ChartWindow window, Instant at, Func<SettingChange, T> picked)
+    {
+        Instant? since = null;
+        var (known, value) = (false, default(T));
+        foreach (var change in window.Of<SettingChange>(EntryKind.SettingChange, at))
+        {
+            var same = known && EqualityComparer<T>.Default.Equals(picked(change.Body), value);
+            (since, known, value) = (same ? since : change.At, true, picked(change.Body));
+        }
+
+        return since;
+    }
+
     /// <summary>The settings to which a gas belongs: those in force at its draw. The same minute means before the change, unless the slip says otherwise.</summary>
     public static Charted<SettingChange>? SettingsAtDraw(ChartWindow window, BloodGas gas, Instant drawn)
     {

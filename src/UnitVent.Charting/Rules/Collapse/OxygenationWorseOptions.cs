@@ -7,6 +7,10 @@ public sealed record OxygenationWorseOptions
     [Threshold("relative fall of P/F in a step", 0.1, 0.4, Source = "Chest 1983;84:14-17: the spread of repeated gases")]
     public double StepFall { get; init; } = 0.20;
 
+    /// <summary>Gets the relative fall of P/F in a drift.</summary>
+    [Threshold("relative fall of P/F in a drift", 0.1, 0.4, Source = "Chest 1983;84:14-17: the spread of repeated gases")]
+    public double TrendFall { get; init; } = 0.15;
+
     /// <summary>Gets how far mean pressure may have been lowered.</summary>
     [Threshold("how far mean pressure may have been lowered", 0, 3, Unit = "cmH2O")]
     public double MeanPressureMayFallCmH2O { get; init; } = 1;

@@ -49,7 +49,7 @@ public sealed class ReleasedLongRule : Rule
             return Clear(at);
         }
 
-        var few = (check.Body.FlowReadings ?? check.Body.ReleasesAveraged ?? 1) < 2;
+        var few = ReleaseChecks.AreFew(check.Body);
         var says = $"release ended at {Numbers.Fixed(percent)} % of peak, edge {Numbers.Fixed(edges.Caution)} %{(few ? "; one release" : "")}";
         return Raise(
             level.LoweredIf(few),
@@ -79,10 +79,8 @@ public sealed class ReleasedLongRule : Rule
                 return new(options.ObstructiveUrgentUnder, options.ObstructiveEdge, options.ObstructiveEdge, holds);
             }
 
-            var own = (double?)picture.Targets?.Body.EndReleaseFlowPercent;
-            var fixedRate = picture.Method == SettingMethod.FixedRate;
-            var target = own ?? (fixedRate ? options.FixedRateTarget : options.FlowGuidedTarget);
-            return fixedRate
+            var target = EndFlowTarget.Percent(picture);
+            return picture.Method == SettingMethod.FixedRate
                 ? new(options.UrgentUnder, target - options.FixedRateCautionBelow, target, holds)
                 : new(options.UrgentUnder, target - options.FlowGuidedCautionBelow, target - options.FlowGuidedAdvisoryBelow, holds);
         }
