@@ -1,5 +1,6 @@
 using UnitVent.Charting.Rules.Airway;
 using UnitVent.Charting.Rules.CarbonDioxide;
+using UnitVent.Charting.Rules.Circulation;
 using UnitVent.Charting.Rules.Collapse;
 using UnitVent.Charting.Rules.Drive;
 using UnitVent.Charting.Rules.Due;
@@ -8,6 +9,7 @@ using UnitVent.Charting.Rules.Slips;
 using UnitVent.Charting.Rules.Sudden;
 using UnitVent.Charting.Rules.Timing;
 using UnitVent.Charting.Rules.Volumes;
+using UnitVent.Charting.Rules.WorkOfBreathing;
 
 namespace UnitVent.Charting.Rules;
 
@@ -32,6 +34,9 @@ public static class RuleSet
         new NotKnownRule(),
         new VolumesDoNotAddUpRule(),
         new OwnShareLowRule(),
+        new OwnShareHighRule(),
+        new FastAndLabouringRule(),
+        new LargeOwnBreathsRule(),
         new RelaxantBegunRule(),
         new CarbonDioxideRisingRule(),
         new PHRule(),
@@ -39,9 +44,13 @@ public static class RuleSet
         new OxygenationWorseRule(),
         new LowOxygenRule(),
         new OxygenAboveTargetRule(),
+        new TubeCompensationOffRule(),
         new DeepSedationRule(),
+        new AgitatedRule(),
         new CheckDueRule(),
         new MeanPressureFellRule(),
+        new SupportUnsettledRule(),
+        new LowPressureRule(),
         new MinuteVolumeFellRule(),
         new OxygenFellAfterPressureRule(),
         new CreepingFiO2Rule(),

@@ -55,6 +55,18 @@ public sealed record RuleThresholds
     [OfRule("R19a")]
     public Drive.OwnShareLowOptions OwnShareLow { get; init; } = new();
 
+    /// <summary>Gets R19b's thresholds.</summary>
+    [OfRule("R19b")]
+    public WorkOfBreathing.OwnShareHighOptions OwnShareHigh { get; init; } = new();
+
+    /// <summary>Gets R19c's thresholds.</summary>
+    [OfRule("R19c")]
+    public WorkOfBreathing.FastAndLabouringOptions FastAndLabouring { get; init; } = new();
+
+    /// <summary>Gets R19d's thresholds.</summary>
+    [OfRule("R19d")]
+    public WorkOfBreathing.LargeOwnBreathsOptions LargeOwnBreaths { get; init; } = new();
+
     /// <summary>Gets R20's thresholds.</summary>
     [OfRule("R20")]
     public Drive.RelaxantBegunOptions RelaxantBegun { get; init; } = new();
@@ -83,9 +95,17 @@ public sealed record RuleThresholds
     [OfRule("R26")]
     public Oxygen.OxygenAboveTargetOptions OxygenAboveTarget { get; init; } = new();
 
+    /// <summary>Gets R29's thresholds.</summary>
+    [OfRule("R29")]
+    public WorkOfBreathing.TubeCompensationOffOptions TubeCompensationOff { get; init; } = new();
+
     /// <summary>Gets R30's thresholds.</summary>
     [OfRule("R30")]
     public Drive.DeepSedationOptions DeepSedation { get; init; } = new();
+
+    /// <summary>Gets R30b's thresholds.</summary>
+    [OfRule("R30b")]
+    public WorkOfBreathing.AgitatedOptions Agitated { get; init; } = new();
 
     /// <summary>Gets R32's thresholds.</summary>
     [OfRule("R32")]
@@ -94,6 +114,14 @@ public sealed record RuleThresholds
     /// <summary>Gets R34's thresholds.</summary>
     [OfRule("R34")]
     public Collapse.MeanPressureFellOptions MeanPressureFell { get; init; } = new();
+
+    /// <summary>Gets R45's thresholds.</summary>
+    [OfRule("R45")]
+    public WorkOfBreathing.SupportUnsettledOptions SupportUnsettled { get; init; } = new();
+
+    /// <summary>Gets R47's thresholds.</summary>
+    [OfRule("R47")]
+    public Circulation.LowPressureOptions LowPressure { get; init; } = new();
 
     /// <summary>Gets R53's thresholds.</summary>
     [OfRule("R53")]

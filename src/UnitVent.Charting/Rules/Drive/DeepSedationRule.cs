@@ -25,6 +25,15 @@ public sealed class DeepSedationRule : Rule
     public override string Remarks => "Quiet while a relaxant acts and when the patient’s target is as deep.";
 
     /// <inheritdoc/>
+    public override bool IsBackInside(Finding open, PatientPicture picture)
+    {
+        var options = picture.Window.Unit.Thresholds.DeepSedation;
+        return picture.Targets?.Body.RassHigh <= options.RassAtMost
+            || Scores(picture).LastOrDefault().Body?.Rass > options.RassAtMost
+            || picture[ValueNames.SpontaneousSharePercent].Value >= options.UnderPercent;
+    }
+
+    /// <inheritdoc/>
     protected override RuleOutcome Look(PatientPicture picture)
     {
         var options = picture.Window.Unit.Thresholds.DeepSedation;
