@@ -85,6 +85,12 @@ public sealed class PatientPicture
     /// <summary>Gets the method in force.</summary>
     public SettingMethod Method { get; }
 
+    /// <summary>Gets the phase that the chart looks like when it is another than the one in force; worked out when it is asked for.</summary>
+    public Proposal<CoursePhase>? PhaseProposal => Proposals.Phase(this);
+
+    /// <summary>Gets the method that the chart looks like when it is another than the one in force; worked out when it is asked for.</summary>
+    public Proposal<SettingMethod>? MethodProposal => Proposals.Method(this);
+
     /// <summary>Gets whether the patient lies prone.</summary>
     public bool Prone { get; }
 

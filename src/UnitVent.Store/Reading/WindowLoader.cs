@@ -68,6 +68,14 @@ internal static class WindowLoader
         return await WindowsAsync(db, profile, episodes, to, from - Span, cancellationToken);
     }
 
+    /// <summary>The windows of some episodes of a unit.</summary>
+    public static async Task<IReadOnlyList<ChartWindow>> OfEpisodesAsync(UnitVentDbContext db, Guid unitId, Guid[] ids, Instant now, CancellationToken cancellationToken)
+    {
+        var profile = await ProfileAsync(db, unitId, now, cancellationToken);
+        var episodes = await EpisodesAsync(db, unitId, e => ids.Contains(e.Id), cancellationToken);
+        return await WindowsAsync(db, profile, episodes, now, null, cancellationToken);
+    }
+
     /// <summary>A unit as its charts are read, with the thresholds that were in force at an instant.</summary>
     public static async Task<UnitProfile> ProfileAsync(UnitVentDbContext db, Guid unitId, Instant at, CancellationToken cancellationToken)
     {

@@ -24,6 +24,12 @@ internal static class Evaluation
         UnitVentDbContext db, EpisodeRow episode, PatientPicture picture, CancellationToken cancellationToken)
     {
         var rows = await db.Flags.Where(f => f.UnitId == episode.UnitId && f.EpisodeId == episode.Id && f.State == FlagState.Open).ToListAsync(cancellationToken);
+        return CarryOn(db, episode, picture, rows);
+    }
+
+    /// <summary>The same with the episode's open flags at hand.</summary>
+    public static IReadOnlyList<FlagStep> CarryOn(UnitVentDbContext db, EpisodeRow episode, PatientPicture picture, List<FlagRow> rows)
+    {
         var open = rows.ConvertAll(r => r.ToFlag());
         var steps = FlagLedger.Next(open, picture, Guid.CreateVersion7);
         foreach (var step in steps)

@@ -139,6 +139,12 @@ public sealed partial class BedsidePage
         await LoadAsync();
     }
 
+    private async Task ConfirmedAsync(Entry entry)
+    {
+        await Me.DoAsync(a => Recorder.RecordAsync(a, Id, [new(Guid.CreateVersion7(), entry)], CancellationToken.None));
+        await LoadAsync();
+    }
+
     private bool May(Operation operation) => actor.May(operation, chart!.Window.Unit.Id);
 
     public void Dispose()

@@ -30,6 +30,22 @@ public sealed class BedsideTests : BunitContext
     }
 
     [Fact]
+    public void Phase_ThatTheChartLooksLike_IsConfirmedByAPerson()
+    {
+        Entry? confirmed = null;
+        var panel = Render<InForcePanel>(p => p
+            .Add(n => n.Picture, ScreenChart.Picture(ScreenChart.Aprv(725)))
+            .Add(n => n.Now, ScreenChart.Now)
+            .Add(n => n.MaySetPhase, true)
+            .Add(n => n.Confirmed, entry => confirmed = entry));
+
+        Assert.Contains("looks like maintaining: 12 h in this mode", panel.Find("[data-testid=phase-proposal]").TextContent, StringComparison.Ordinal);
+        panel.Find("[data-testid=phase-proposal] button").Click();
+
+        Assert.Equal(new PhaseChoice { Phase = CoursePhase.Maintaining, From = ScreenChart.Now, Reason = "12 h in this mode" }, confirmed);
+    }
+
+    [Fact]
     public void Words_ForEveryValueOfThePicture_AreThere()
     {
         var inHeader = new[] { ValueNames.PredictedBodyWeightKg, ValueNames.VentilatorDays };
