@@ -1,7 +1,6 @@
 using NodaTime;
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Rules;
-using UnitVent.Charting.Windows;
 
 namespace UnitVent.Charting.Pictures;
 

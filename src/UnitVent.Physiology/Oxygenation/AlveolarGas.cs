@@ -35,6 +35,12 @@ public static class AlveolarGas
     public static double ArterialAlveolarRatio(PartialPressure alveolar, PartialPressure arterial)
         => arterial.MmHg / Guard.Positive(alveolar.MmHg, nameof(alveolar));
 
+    /// <summary>Computes the alveolar–arterial difference expected while breathing room air, in mmHg: age / 4 + 4.</summary>
+    /// <remarks>Source: from memory. On room air only: with more oxygen the difference grows and nothing is expected of it.</remarks>
+    /// <param name="years">Age in years, in [18, 120].</param>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="years"/> is NaN or outside its range.</exception>
+    public static double ExpectedGradientOnAirMmHg(double years) => (Guard.InRange(years, 18, 120) / 4) + 4;
+
     private static double Evaluate(OxygenFraction fiO2, BarometricPressure barometric, PartialPressure paCO2)
     {
         var inspired = fiO2.Fraction * (barometric.MmHg - WaterVapourMmHg);

@@ -70,6 +70,20 @@ public sealed class AlveolarGasTests
         Expect.Refused(() => AlveolarGas.ArterialAlveolarRatio(default, MmHg(80)));
     }
 
+    /// <summary>From memory: a quarter of the age and 4.</summary>
+    [Theory]
+    [InlineData(18, 8.5)]
+    [InlineData(60, 19)]
+    [InlineData(120, 34)]
+    public void ExpectedGradient_OnAir_GrowsWithAge(double years, double expected) => Assert.Equal(expected, AlveolarGas.ExpectedGradientOnAirMmHg(years), 12);
+
+    [Theory]
+    [InlineData(17.999)]
+    [InlineData(120.001)]
+    [InlineData(double.NaN)]
+    public void ExpectedGradient_OutsideAdultYears_IsRefused(double years)
+        => Assert.Throws<ArgumentOutOfRangeException>(() => AlveolarGas.ExpectedGradientOnAirMmHg(years));
+
     private static PartialPressure Alveolar(double fiO2, double barometric, double paCO2)
         => AlveolarGas.AlveolarPO2(FiO2(fiO2), BarometricPressure.FromMmHg(barometric), MmHg(paCO2));
 }

@@ -42,4 +42,9 @@ public sealed class ProblemTests(RunningApp app)
         Assert.Equal((HttpStatusCode.NotFound, "application/problem+json"), (answer.Status, answer.MediaType));
     }
 
+    private static async Task<Answer> SendAsync(Caller caller, string path, string body)
+    {
+        using var content = new StringContent(body, Encoding.UTF8, "application/json");
+        return await caller.SendAsync(HttpMethod.Post, path, content);
+    }
 }
