@@ -5,11 +5,11 @@ namespace UnitVent.Charting.Tests.Rules;
 /// <summary>Limits: common practice.</summary>
 public sealed class AirwayRuleTests : RuleTable
 {
-    // With T low 0.5 s a time constant τ leaves 100 e^(−0.5/τ) % of the peak flow: τ = 1, 1.067, 1.134 … s.
+    // With T low 0.5 s a time constant τ leaves 100 e^(−0.5/τ) % of the peak flow: τ = 1, 1.096, 1.192 … s.
     public static TheoryData<Entry[], Circumstance[], string, string> R59 => new()
     {
-        { [Chart.Aprv(), .. Checks(60.65m, 62.59m, 64.34m, 65.92m, 67.40m)], [], "Caution", "τ +0.27 s from a median of 1.07 s, just over 25 %" },
-        { [Chart.Aprv(), .. Checks(60.65m, 62.57m, 64.31m, 65.90m, 67.34m)], [], Clear, "just under 25 %" },
+        { [Chart.Aprv(), .. Checks(60.65m, 63.37m, 65.74m, 67.83m, 69.69m)], [], "Caution", "τ +0.38 s from a median of 1.10 s, just over 35 %" },
+        { [Chart.Aprv(), .. Checks(60.65m, 63.36m, 65.73m, 67.81m, 69.66m)], [], Clear, "just under 35 %" },
         { [Chart.Aprv(), .. Checks(67, 65, 63, 61, 60)], [], Clear, "falling" },
         { [Chart.Aprv(), .. Checks(60, 66, 62, 70, 64)], [], Clear, "no order in time" },
         { [Chart.Aprv(), .. Checks(50, 60, 70)], [], CannotTell, "three checks" },

@@ -15,6 +15,9 @@ public sealed class DriveRuleTests : RuleTable
         { [Chart.Aprv(1000), Own(25, 0)], [], Clear, "one check" },
         { [Chart.Aprv(1000), Own(265, 0.6m), Own(25, 0.6m), CO2(400, 45), CO2(30, 50.7m)], [], "Caution", "PaCO2 +5.7 mmHg" },
         { [Chart.Aprv(1000), Own(265, 0.6m), Own(25, 0.6m), CO2(400, 45), CO2(30, 50.5m)], [], "Advisory", "PaCO2 +5.5 mmHg" },
+        { [Chart.Aprv(1000), Own(500, 1.65m), Own(265, 0.6m), Own(25, 0.6m)], [], "Caution", "25 → 9 %" },
+        { [Chart.Aprv(1000), Own(500, 1.5m), Own(265, 0.6m), Own(25, 0.6m)], [], "Advisory", "23 → 9 %" },
+        { [Chart.Aprv(1000), Silent(265), Silent(25)], [], "Advisory", "own rate 0 in both, although the volumes do not add up" },
         { [Chart.Aprv(719), Own(265, 0), Own(25, 0)], [], CannotTell, "first 12 h of APRV" },
         { [Chart.Aprv(720), Own(265, 0), Own(25, 0)], [], "Advisory", "after 12 h" },
         { [Chart.Aprv(1000), Own(265, 0), Own(25, 0), Event(300, EventKind.RelaxantStart)], [], CannotTell, "a relaxant acts" },
@@ -88,6 +91,9 @@ public sealed class DriveRuleTests : RuleTable
 
     /// <summary>A check whose total is 6.6 L/min: 0.66 is a share of 10 %.</summary>
     private static VentilatorCheck Own(double minutesAgo, decimal litresPerMin) => Chart.Check(minutesAgo) with { SpontaneousMinuteVolumeLMin = litresPerMin };
+
+    /// <summary>No own breaths, and releases that make more than the total.</summary>
+    private static VentilatorCheck Silent(double minutesAgo) => Chart.Check(minutesAgo, release: 700) with { SpontaneousRatePerMin = 0 };
 
     private static Entry[] Asleep(double minutesAgo, int rass, decimal ownLitresPerMin) =>
         [new BreathingCheck { ObservedAt = Chart.Ago(minutesAgo), Rass = rass }, Own(minutesAgo, ownLitresPerMin)];

@@ -15,11 +15,11 @@ public sealed class DriveStoryTests
         story.At(4, Round(-2, 1.5m)).Stands();
         story.At(8, Round(-4, 0.2m)).Stands();
         story.At(11.9, Round(-4, 0.2m)).Stands();
-        story.At(12.5, Round(-4, 0.2m)).Stands("R19a Advisory");
-        story.At(16, Round(-4, 0.2m)).Stands("R19a Advisory", "R30 Advisory");
-        story.At(17, new BedsideEvent { What = EventKind.RelaxantStart }).Stands("R19a Advisory", "R20 Advisory", "R30 Advisory");
-        story.At(18, Chart.Gas()).Stands("R19a Advisory", "R30 Advisory");
-        story.At(22, new BedsideEvent { What = EventKind.RelaxantStop }).Stands("R19a Advisory", "R30 Advisory");
+        story.At(12.5, Round(-4, 0.2m)).Stands("R19a Caution");
+        story.At(16, Round(-4, 0.2m)).Stands("R19a Caution", "R30 Advisory");
+        story.At(17, new BedsideEvent { What = EventKind.RelaxantStart }).Stands("R19a Caution", "R20 Advisory", "R30 Advisory");
+        story.At(18, Chart.Gas()).Stands("R19a Caution", "R30 Advisory");
+        story.At(22, new BedsideEvent { What = EventKind.RelaxantStop }).Stands("R19a Caution", "R30 Advisory");
         story.At(24, Round(-1, 1.9m)).Stands();
     }
 

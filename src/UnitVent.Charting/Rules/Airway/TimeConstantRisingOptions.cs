@@ -5,7 +5,7 @@ public sealed record TimeConstantRisingOptions
 {
     /// <summary>Gets the relative rise over a series of checks.</summary>
     [Threshold("relative rise over a series of checks", 0.15, 0.6)]
-    public double Rise { get; init; } = 0.25;
+    public double Rise { get; init; } = 0.35;
 
     /// <summary>Gets the end-release flow under which a check does not count.</summary>
     [Threshold("end-release flow under which a check does not count", 2, 20, Unit = "% of peak")]

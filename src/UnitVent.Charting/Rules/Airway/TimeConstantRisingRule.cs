@@ -17,7 +17,7 @@ public sealed class TimeConstantRisingRule : Rule
     public override string Seen => "expiratory time constant rising at the same settings";
 
     /// <inheritdoc/>
-    public override string Levels => "a drift by 25 % caution";
+    public override string Levels => "a drift by 35 % caution";
 
     /// <inheritdoc/>
     public override string Remarks => "Needs four valid checks over 4 h since pressures and times were last changed.";

@@ -47,16 +47,18 @@ public sealed class DeepSedationRule : Rule
             return Clear(target.At);
         }
 
-        var share = picture[ValueNames.SpontaneousSharePercent];
         var scores = Scores(picture);
-        if (share.Value is not { } percent || share.AsOf is not { } at || scores.Count == 0 || picture.AsOf - scores[^1].At > picture.Limits.Readings)
+        if (scores.Count == 0 || picture.AsOf - scores[^1].At > picture.Limits.Readings)
         {
-            return CannotTell("Needs a recent RASS and own share of minute ventilation.");
+            return CannotTell("Needs a recent RASS.");
         }
 
+        var share = picture[ValueNames.SpontaneousSharePercent];
         var deep = scores.AsEnumerable().Reverse().TakeWhile(s => s.Body.Rass <= options.RassAtMost).ToList();
-        var low = percent < options.UnderPercent && deep.Count > 1 ? LowShare.Run(picture, options.UnderPercent) : [];
-        return low.Count > 1 && Together(deep, low) >= Duration.FromHours(options.ForHours) ? Deep(deep, low) : Clear(Instant.Min(at, scores[^1].At));
+        var low = deep.Count > 1 && LowShare.MayBe(picture, options.UnderPercent) ? LowShare.Run(picture, options.UnderPercent) : [];
+        return low.Count > 1 && picture.AsOf - low[0].At <= picture.Limits.Readings && Together(deep, low) >= Duration.FromHours(options.ForHours) ? Deep(deep, low)
+            : deep.Count > 0 && low.Count == 0 && share.Value is null ? CannotTell(share)
+            : Clear(scores[^1].At);
     }
 
     private static List<Charted<BreathingCheck>> Scores(PatientPicture picture) =>

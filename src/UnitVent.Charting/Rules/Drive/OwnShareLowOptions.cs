@@ -11,6 +11,10 @@ public sealed record OwnShareLowOptions
     [Threshold("how long checks have to show it", 2, 12, Unit = "h")]
     public double ForHours { get; init; } = 4;
 
+    /// <summary>Gets the fall against the 12 h before that makes it a caution.</summary>
+    [Threshold("fall against the 12 h before that makes it a caution", 10, 40, Unit = "points")]
+    public double LostPoints { get; init; } = 15;
+
     /// <summary>Gets how long it is not judged after APRV began.</summary>
     [Threshold("how long it is not judged after APRV began", 0, 48, Unit = "h")]
     public double NotBeforeHours { get; init; } = 12;
