@@ -7,7 +7,6 @@ namespace UnitVent.Simulation.Cohort;
 internal sealed class StudyPlan
 {
     private const int RoundsPerAirwayCheck = 4;
-    private const int RoundsPerSuction = 3;
 
     private readonly IReadOnlyList<PlannedMoment> scripted;
 
@@ -24,7 +23,7 @@ internal sealed class StudyPlan
 
     public IReadOnlyList<PlannedMoment> Until(int lastMinute) =>
         [.. scripted
-            .Concat(CheckMinutes.Select((m, i) => new PlannedMoment.Round(m, i % RoundsPerAirwayCheck == 0, i % RoundsPerSuction == 1)))
+            .Concat(CheckMinutes.Select((m, i) => new PlannedMoment.Round(m, i % RoundsPerAirwayCheck == 0)))
             .Concat(GasMinutes.Select(m => new PlannedMoment.Gas(m)))
             .Where(m => m.Minute <= lastMinute)
             .OrderBy(m => m.Minute)];
