@@ -94,7 +94,7 @@ public class EvaluationBenchmarks
     }
 
     private Task<Charting.Results.Result<RecordReceipt>> RecordAsync(Guid episode, params Entry[] entries) =>
-        services!.GetRequiredService<ChartRecorder>().RecordAsync(actor!, episode, [.. entries.Select(e => new NewEntry(Guid.CreateVersion7(), e))], default);
+        services!.GetRequiredService<ChartRecorder>().RecordAsync(actor!, episode, [.. entries.Select(e => new NewEntry(Guid.CreateVersion7(), e) { Confirmed = ["ask.effectiveAt", "ask.observedAt", "ask.drawnAt"] })], default);
 
     private static VentilatorCheck Check(Instant at) => new()
     {
