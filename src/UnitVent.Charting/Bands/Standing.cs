@@ -17,18 +17,24 @@ public sealed record Standing(Band Band, string Why, Instant? Since, IReadOnlyLi
     private const string NotKnownRuleId = "R17";
 
     private static readonly Duration LateAfter = Duration.FromMinutes(30);
+    private static readonly Duration LookWithin = Duration.FromHours(1);
 
     /// <summary>Gets the card that leads; null when none is open.</summary>
     public Card? Leading => Cards.Count > 0 ? Cards[0] : null;
+
+    /// <summary>Gets by when somebody looks: an hour after a caution card was raised, or when it is no longer in hand; null outside <see cref="Band.LookThisHour"/>.</summary>
+    public Instant? DueAt => Band == Band.LookThisHour
+        ? Cards.Where(IsForThisHour).Min(c => c.InHand ? c.Leading.ComesBackAt!.Value : c.Flags.Min(f => f.Since) + LookWithin)
+        : null;
 
     /// <summary>Where the patient stands, from the open flags and the picture.</summary>
     public static Standing Of(IReadOnlyList<Flag> open, PatientPicture picture)
     {
         ArgumentNullException.ThrowIfNull(picture);
-        var cards = CardsOf(open);
+        var cards = OpenCards.Of(open);
         var unknown = picture.Outcomes.OfType<RuleOutcome.Raised>().FirstOrDefault(o => o.Rule == NotKnownRuleId)?.Finding;
         var band = cards.Any(c => c.Severity == Severity.Urgent) ? Band.LookNow
-            : cards.Any(c => c.Severity == Severity.Caution || c.Flags.Any(f => f.Finding.Overdue)) ? Band.LookThisHour
+            : cards.Any(IsForThisHour) ? Band.LookThisHour
             : unknown is not null ? Band.NotKnown
             : Band.NothingRaised;
         if (band == Band.NotKnown)
@@ -41,17 +47,7 @@ public sealed record Standing(Band Band, string Why, Instant? Since, IReadOnlyLi
             : new(band, Sentence(Says(cards[0]), Age(cards[0].Leading.Finding, picture), cards.Count - 1), cards[0].Flags.Min(f => f.Since), cards);
     }
 
-    private static List<Card> CardsOf(IReadOnlyList<Flag> open)
-    {
-        // A long release explains a collapse: while oxygen falls too, both stand on one card.
-        var collapsing = open.Any(f => f.Finding.Family == Family.Collapse);
-        return [.. open
-            .GroupBy(f => collapsing && f.Finding.Family == Family.Timing ? Family.Collapse : f.Finding.Family)
-            .Select(g => new Card(g.Key, [.. g.OrderByDescending(f => f.Finding.Severity).ThenByDescending(f => f.Finding.SeenAt)]))
-            .OrderByDescending(c => c.Severity)
-            .ThenBy(c => c.InHand)
-            .ThenByDescending(c => c.Leading.Finding.SeenAt)];
-    }
+    private static bool IsForThisHour(Card card) => card.Severity == Severity.Caution || card.Flags.Any(f => f.Finding.Overdue);
 
     private static string Says(Card card) => string.Join("; ", card.Flags.Select(f => f.Finding.Says));
 

@@ -33,7 +33,11 @@ public static class FlagLedger
                 _ when flag is not null => NoLonger(flag, outcome, picture),
                 _ => null,
             };
-            step ??= flag is { InHand: { } hand } && hand.Until <= picture.AsOf ? new FlagStep(FlagStepKind.Reopened, flag.Id, flag.Finding) : null;
+            if (flag is { InHand: not null } && IsBack(flag, picture) && (step?.Kind is null or FlagStepKind.StillTrue or FlagStepKind.Milder))
+            {
+                step = new FlagStep(FlagStepKind.Reopened, flag.Id, step?.Finding ?? flag.Finding);
+            }
+
             if (step is not null)
             {
                 steps.Add(step);
@@ -55,13 +59,16 @@ public static class FlagLedger
         return step.Kind switch
         {
             FlagStepKind.Raised or FlagStepKind.StillTrue or FlagStepKind.Milder => current with { Finding = step.Finding },
-            FlagStepKind.Worse => current with { Finding = step.Finding, InHand = null },
-            FlagStepKind.Reopened => current with { InHand = null },
+            FlagStepKind.Worse or FlagStepKind.Reopened => current with { Finding = step.Finding, InHand = null },
             FlagStepKind.Cleared => current with { State = FlagState.Cleared, ClosedAt = at, InHand = null },
             FlagStepKind.ClosedByCorrection => current with { State = FlagState.ClosedByCorrection, ClosedAt = at, InHand = null },
             FlagStepKind.Acknowledged => current,
         };
     }
+
+    /// <summary>Whether a flag is in hand no longer: its time is over, or it rests on a setting that is another now.</summary>
+    private static bool IsBack(Flag flag, PatientPicture picture) =>
+        flag.ComesBackAt <= picture.AsOf || (flag.IsHeard && picture.Settings?.At > flag.InHand!.At);
 
     private static FlagStep? Again(Flag flag, Finding found)
     {

@@ -7,7 +7,7 @@ namespace UnitVent.Charting.Rules;
 /// <summary>The checks that rules about releases look at.</summary>
 internal static class ReleaseChecks
 {
-    private const decimal LeakThatInvalidatesPercent = 30; // common practice
+    public const decimal LeakThatInvalidatesPercent = 30; // common practice
 
     public static IReadOnlyList<Charted<VentilatorCheck>> WithFlows(PatientPicture picture) =>
         [.. picture.Window.Of<VentilatorCheck>(EntryKind.VentilatorCheck, picture.AsOf)

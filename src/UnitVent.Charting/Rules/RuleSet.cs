@@ -4,8 +4,10 @@ using UnitVent.Charting.Rules.Circulation;
 using UnitVent.Charting.Rules.Collapse;
 using UnitVent.Charting.Rules.Drive;
 using UnitVent.Charting.Rules.Due;
+using UnitVent.Charting.Rules.Liberation;
 using UnitVent.Charting.Rules.Oxygen;
 using UnitVent.Charting.Rules.Slips;
+using UnitVent.Charting.Rules.StepDown;
 using UnitVent.Charting.Rules.Sudden;
 using UnitVent.Charting.Rules.Timing;
 using UnitVent.Charting.Rules.Volumes;
@@ -24,6 +26,7 @@ public static class RuleSet
         new TimeLowRule(),
         new ReleaseVolumeHighRule(),
         new ReleaseVolumeLowRule(),
+        new PHighRule(),
         new ReleaseRateRule(),
         new ShareAtPHighRule(),
         new ComplianceFallingRule(),
@@ -47,10 +50,23 @@ public static class RuleSet
         new TubeCompensationOffRule(),
         new DeepSedationRule(),
         new AgitatedRule(),
+        new ChangeUnansweredRule(),
         new CheckDueRule(),
+        new PlateauDueRule(),
         new MeanPressureFellRule(),
+        new StepWithoutTimeRule(),
+        new LargeStepRule(),
+        new CpapLevelRule(),
+        new TrialScreenRule(),
+        new TrialOutcomeRule(),
+        new TrialOxygenRule(),
+        new TidalVolumeHighRule(),
+        new PlateauHighRule(),
+        new DrivingPressureHighRule(),
+        new TrappedPressureRule(),
         new SupportUnsettledRule(),
         new LowPressureRule(),
+        new BaselineDueRule(),
         new MinuteVolumeFellRule(),
         new OxygenFellAfterPressureRule(),
         new CreepingFiO2Rule(),

@@ -23,6 +23,10 @@ public sealed record RuleThresholds
     [OfRule("R05")]
     public Collapse.ReleaseVolumeLowOptions ReleaseVolumeLow { get; init; } = new();
 
+    /// <summary>Gets R06's thresholds.</summary>
+    [OfRule("R06")]
+    public Volumes.PHighOptions PHigh { get; init; } = new();
+
     /// <summary>Gets R07's thresholds.</summary>
     [OfRule("R07")]
     public Timing.ReleaseRateOptions ReleaseRate { get; init; } = new();
@@ -107,13 +111,57 @@ public sealed record RuleThresholds
     [OfRule("R30b")]
     public WorkOfBreathing.AgitatedOptions Agitated { get; init; } = new();
 
+    /// <summary>Gets R31's thresholds.</summary>
+    [OfRule("R31")]
+    public Due.ChangeUnansweredOptions ChangeUnanswered { get; init; } = new();
+
     /// <summary>Gets R32's thresholds.</summary>
     [OfRule("R32")]
     public Due.CheckDueOptions CheckDue { get; init; } = new();
 
+    /// <summary>Gets R33's thresholds.</summary>
+    [OfRule("R33")]
+    public Due.PlateauDueOptions PlateauDue { get; init; } = new();
+
     /// <summary>Gets R34's thresholds.</summary>
     [OfRule("R34")]
     public Collapse.MeanPressureFellOptions MeanPressureFell { get; init; } = new();
+
+    /// <summary>Gets R35's thresholds.</summary>
+    [OfRule("R35")]
+    public StepDown.StepWithoutTimeOptions StepWithoutTime { get; init; } = new();
+
+    /// <summary>Gets R36's thresholds.</summary>
+    [OfRule("R36")]
+    public StepDown.LargeStepOptions LargeStep { get; init; } = new();
+
+    /// <summary>Gets R37's thresholds.</summary>
+    [OfRule("R37")]
+    public StepDown.CpapLevelOptions CpapLevel { get; init; } = new();
+
+    /// <summary>Gets R38's thresholds.</summary>
+    [OfRule("R38")]
+    public Liberation.TrialScreenOptions TrialScreen { get; init; } = new();
+
+    /// <summary>Gets R39's thresholds.</summary>
+    [OfRule("R39")]
+    public Liberation.TrialOutcomeOptions TrialOutcome { get; init; } = new();
+
+    /// <summary>Gets R41's thresholds.</summary>
+    [OfRule("R41")]
+    public Volumes.TidalVolumeHighOptions TidalVolumeHigh { get; init; } = new();
+
+    /// <summary>Gets R42's thresholds.</summary>
+    [OfRule("R42")]
+    public Volumes.PlateauHighOptions PlateauHigh { get; init; } = new();
+
+    /// <summary>Gets R43's thresholds.</summary>
+    [OfRule("R43")]
+    public Volumes.DrivingPressureHighOptions DrivingPressureHigh { get; init; } = new();
+
+    /// <summary>Gets R44's thresholds.</summary>
+    [OfRule("R44")]
+    public Volumes.TrappedPressureOptions TrappedPressure { get; init; } = new();
 
     /// <summary>Gets R45's thresholds.</summary>
     [OfRule("R45")]
@@ -122,6 +170,10 @@ public sealed record RuleThresholds
     /// <summary>Gets R47's thresholds.</summary>
     [OfRule("R47")]
     public Circulation.LowPressureOptions LowPressure { get; init; } = new();
+
+    /// <summary>Gets R51's thresholds.</summary>
+    [OfRule("R51")]
+    public Due.BaselineDueOptions BaselineDue { get; init; } = new();
 
     /// <summary>Gets R53's thresholds.</summary>
     [OfRule("R53")]

@@ -21,11 +21,12 @@ public sealed record UnitBoard(UnitProfile Unit, Instant AsOf, IReadOnlyList<Boa
             .ThenBy(r => WithinBand(r))
             .ThenBy(r => Place(unit, r))]);
 
-    // Look now: newest first. Look this hour and not known: longest waiting first. The rest: by bed.
+    // Look now: newest first. Look this hour: soonest due first. Not known: oldest first. The rest: by bed.
     private static long WithinBand(BoardRow row) => row.Standing.Band switch
     {
         Band.LookNow => -(row.Standing.Since ?? Instant.MinValue).ToUnixTimeTicks(),
-        Band.LookThisHour or Band.NotKnown => (row.Standing.Since ?? Instant.MaxValue).ToUnixTimeTicks(),
+        Band.LookThisHour => (row.Standing.DueAt ?? Instant.MaxValue).ToUnixTimeTicks(),
+        Band.NotKnown => (row.Standing.Since ?? Instant.MaxValue).ToUnixTimeTicks(),
         Band.NothingRaised => 0,
     };
 

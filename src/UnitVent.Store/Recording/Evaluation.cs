@@ -48,7 +48,7 @@ internal static class Evaluation
             db.FlagEvents.Add(EventOf(row, step.Kind, picture.AsOf, Program));
         }
 
-        episode.NextEvaluationAt = Soonest(picture.NextChangeAt, rows.Where(r => r.State == FlagState.Open).Select(r => r.ToFlag().InHand?.Until));
+        episode.NextEvaluationAt = Soonest(picture.NextChangeAt, rows.Where(r => r.State == FlagState.Open).Select(r => r.ToFlag().ComesBackAt));
         return steps;
     }
 

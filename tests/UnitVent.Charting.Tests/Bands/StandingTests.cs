@@ -48,6 +48,68 @@ public sealed class StandingTests
         Assert.Equal(["R01", "R24"], card.Flags.Select(f => f.Finding.Rule).Order());
     }
 
+    /// <summary>A finding of one rule joins the card of another family only while that is open: rules that explain one another.</summary>
+    public static TheoryData<string, Family, string, Family, Family> Joins => new()
+    {
+        { "R01", Family.Timing, "R24", Family.Collapse, Family.Collapse },
+        { "R02", Family.Timing, "R59", Family.Airway, Family.Airway },
+        { "R53", Family.Drive, "R21", Family.CarbonDioxide, Family.CarbonDioxide },
+        { "R07", Family.Timing, "R24", Family.Collapse, Family.Timing },
+        { "R02", Family.Timing, "R24", Family.Collapse, Family.Timing },
+        { "R53", Family.Drive, "R25", Family.Oxygen, Family.Drive },
+    };
+
+    [Theory, MemberData(nameof(Joins))]
+    public void Finding_StandsWithWhatItExplains(string rule, Family own, string other, Family otherFamily, Family expected)
+    {
+        var standing = Standing.Of([FlagOf(rule, own, 1), FlagOf(other, otherFamily, 2)], Chart.Round().Picture());
+
+        Assert.Equal(expected, standing.Cards.Single(c => c.Flags.Any(f => f.Finding.Rule == rule)).Family);
+        Assert.Equal(own, Assert.Single(Standing.Of([FlagOf(rule, own, 1)], Chart.Round().Picture()).Cards).Family);
+    }
+
+    [Fact]
+    public void SuddenChange_TakesInWhatTheSameCheckShows_AndNothingElse()
+    {
+        var standing = Standing.Of(
+            [FlagOf("R56", Family.Sudden, 1), FlagOf("R25", Family.Oxygen, 1), FlagOf("R47", Family.Circulation, 1), FlagOf("R21", Family.CarbonDioxide, 2), FlagOf("R18", Family.Entry, 1)],
+            Chart.Round().Picture());
+
+        Assert.Equal([Family.Sudden, Family.CarbonDioxide, Family.Entry], standing.Cards.Select(c => c.Family).OrderBy(f => f != Family.Sudden).ThenBy(f => f));
+        Assert.Equal(["R25", "R47", "R56"], standing.Cards.Single(c => c.Family == Family.Sudden).Flags.Select(f => f.Finding.Rule).Order());
+    }
+
+    [Fact]
+    public void HeardOfASetting_LeavesTheCards()
+    {
+        var picture = new Chart().With(Chart.Aprv(high: 32), Chart.Gas(), Chart.Check()).Picture();
+        var flags = Raised(picture);
+
+        Assert.Contains(Standing.Of(flags, picture).Cards, c => c.Leading.Finding.Rule == "R06");
+        Assert.DoesNotContain(Standing.Of([.. flags.Select(f => f with { InHand = Hand(60) })], picture).Cards, c => c.Leading.Finding.Rule == "R06");
+    }
+
+    [Fact]
+    public void CriteriaThatMatch_StepBackWhileACautionIsOpen()
+    {
+        var picture = Chart.Round().Picture();
+        var matches = FlagOf("R38", Family.Liberation, 1, Severity.Information);
+
+        Assert.Single(Standing.Of([matches], picture).Cards);
+        Assert.DoesNotContain(Standing.Of([matches, FlagOf("R47", Family.Circulation, 2)], picture).Cards, c => c.Family == Family.Liberation);
+    }
+
+    /// <summary>Within the hour: an hour after it was raised, or when the time in hand is over.</summary>
+    [Fact]
+    public void LookThisHour_IsDueAnHourAfterItWasRaised_OrWhenTheTimeInHandIsOver()
+    {
+        var (picture, flag) = (Chart.Round().Picture(), FlagOf("R47", Family.Circulation, 1));
+
+        Assert.Equal(flag.Since + NodaTime.Duration.FromHours(1), Standing.Of([flag], picture).DueAt);
+        Assert.Equal(Chart.Now + NodaTime.Duration.FromMinutes(90), Standing.Of([flag with { InHand = Hand(90) }], picture).DueAt);
+        Assert.Null(Standing.Of([], picture).DueAt);
+    }
+
     [Fact]
     public void Why_CarriesAgeAndFurtherCards()
     {
@@ -67,6 +129,14 @@ public sealed class StandingTests
 
         Assert.Contains("late entry", Standing.Of(Raised(picture), picture).Why);
     }
+
+    private static Flag FlagOf(string rule, Family family, long entry, Severity severity = Severity.Caution) => new(
+        Guid.NewGuid(),
+        Guid.Empty,
+        new Finding(rule, family, severity, "says", "look", Chart.Ago(30), new Dictionary<string, double>(), [Chart.Id(entry)]),
+        Chart.Ago(30));
+
+    private static Acknowledgement Hand(double minutes) => new(Chart.Ago(1), "Nurse", null, Chart.Now + NodaTime.Duration.FromMinutes(minutes), null, null);
 
     private static Standing Of(Chart chart)
     {

@@ -78,7 +78,7 @@ public sealed class FlagLedgerTests
     {
         var open = Run([], LongRelease(40).Picture()).Select(f => f with { InHand = InHand with { Until = Chart.Ago(1) } }).ToList();
 
-        var step = Assert.Single(FlagLedger.Next(open, LongRelease(40).Picture(), Guid.NewGuid));
+        var step = Assert.Single(FlagLedger.Next(open, LongRelease(40).Picture(), Guid.NewGuid), s => s.Finding.Rule == "R01");
 
         Assert.Equal(FlagStepKind.Reopened, step.Kind);
         Assert.Null(FlagLedger.Apply(open.Single(f => f.Id == step.FlagId), step, Guid.Empty, Chart.Now).InHand);
@@ -133,6 +133,31 @@ public sealed class FlagLedgerTests
         Assert.Contains(
             FlagLedger.Next(open, Fallen().With(Chart.Check(20, spO2: 94, map: 75)).Picture(), Guid.NewGuid),
             s => s is { Kind: FlagStepKind.Cleared, Finding.Rule: "R56" });
+    }
+
+    /// <summary>What rests on a setting is said once: heard, it is quiet for 12 h, though it was in hand for one.</summary>
+    [Theory]
+    [InlineData(11.9, false, "not yet 12 h")]
+    [InlineData(12, true, "12 h")]
+    public void HeardOfASetting_IsQuietFor12Hours(double hours, bool back, string reason)
+    {
+        var chart = new Chart().With(Chart.Aprv(high: 32), Chart.Check());
+        var open = Run([], chart.Picture()).Select(f => f with { InHand = new(Chart.Now, "Nurse", null, Chart.Now + Duration.FromHours(1), null, null) }).ToList();
+        var later = chart.Picture(Chart.Now + Duration.FromHours(hours));
+
+        Assert.True(back == FlagLedger.Next(open, later, Guid.NewGuid).Any(s => s is { Kind: FlagStepKind.Reopened, Finding.Rule: "R06" }), reason);
+    }
+
+    [Fact]
+    public void HeardOfASetting_ComesBackWhenTheSettingIsAnother()
+    {
+        var hand = InHand with { At = Chart.Ago(200), Until = Chart.Now + Duration.FromHours(5) };
+        var open = Run([], new Chart().With(Chart.Aprv(high: 33)).Picture()).Select(f => f with { InHand = hand }).ToList();
+
+        var after = Run(open, new Chart().With(Chart.Aprv(high: 33), Chart.Aprv(60, high: 32)).Picture());
+
+        Assert.Null(after.Single(f => f.Finding.Rule == "R06").InHand);
+        Assert.StartsWith("P high 32", after.Single(f => f.Finding.Rule == "R06").Finding.Says, StringComparison.Ordinal);
     }
 
     private static Chart LongRelease(decimal endPercent) => new Chart().With(Chart.Aprv(), Chart.Gas(), Chart.Check(peak: 100, end: endPercent));

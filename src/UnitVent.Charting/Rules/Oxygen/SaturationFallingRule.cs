@@ -39,15 +39,20 @@ public sealed class SaturationFallingRule : Rule
     {
         var since = Since(picture);
         var checks = picture.Window.Of<VentilatorCheck>(EntryKind.VentilatorCheck, picture.AsOf).Where(c => c.At >= since && c.Body.SpO2Percent is not null).ToList();
-        if (checks.Count < Drift.FewestPoints || picture.AsOf - checks[^1].At > picture.Limits.Readings)
+        if (checks.Count == 0 || picture.AsOf - checks[^1].At > picture.Limits.Readings)
         {
-            return CannotTell("Needs four recent checks with SpO2 under alike settings.");
+            return CannotTell("Needs recent checks with SpO2.");
         }
 
         var highest = checks.Max(c => c.Body.SpO2Percent!.Value);
         if ((double)(highest - checks[^1].Body.SpO2Percent!.Value) < WorthALookPoints)
         {
             return Clear(checks[^1].At);
+        }
+
+        if (checks.Count < Drift.FewestPoints)
+        {
+            return CannotTell("Needs four checks with SpO2 under alike settings.");
         }
 
         var drift = Drift.Of(picture.Drifts["spO2Percent"].Points.Where(p => p.At >= since), DriftVariables.SpO2);
