@@ -6,8 +6,8 @@ public sealed class PermissionTests
 {
     private static readonly Operation[] Nurse = [Operation.Read, Operation.Print, Operation.Chart, Operation.Admit, Operation.SetPhase];
     private static readonly Operation[] Therapist = [.. Nurse, Operation.Acknowledge, Operation.SetMethod];
-    private static readonly Operation[] Charge = [.. Therapist, Operation.StrikeOthers, Operation.SetContext, Operation.ManageBeds];
-    private static readonly Operation[] Physician = [.. Therapist, Operation.StrikeOthers, Operation.SetContext, Operation.SetTargets];
+    private static readonly Operation[] Charge = [.. Therapist, Operation.StrikeOthers, Operation.SetContext, Operation.SetThresholds, Operation.ManageBeds];
+    private static readonly Operation[] Physician = [.. Therapist, Operation.StrikeOthers, Operation.SetContext, Operation.SetThresholds, Operation.SetTargets];
 
     public static TheoryData<UnitRole, Operation[]> Allowed => new()
     {
