@@ -10,6 +10,7 @@ public sealed class AirwayRuleTests : RuleTable
     {
         { [Chart.Aprv(), .. Checks(60.65m, 63.37m, 65.74m, 67.83m, 69.69m)], [], "Caution", "τ +0.38 s from a median of 1.10 s, just over 35 %" },
         { [Chart.Aprv(), .. Checks(60.65m, 63.36m, 65.73m, 67.81m, 69.66m)], [], Clear, "just under 35 %" },
+        { [Chart.Aprv(), .. Checks(50, 56, 63, 70)], [], "Advisory", "four checks: a drift, but not a sure one" },
         { [Chart.Aprv(), .. Checks(67, 65, 63, 61, 60)], [], Clear, "falling" },
         { [Chart.Aprv(), .. Checks(60, 66, 62, 70, 64)], [], Clear, "no order in time" },
         { [Chart.Aprv(), .. Checks(50, 60, 70)], [], CannotTell, "three checks" },

@@ -23,6 +23,11 @@ public sealed class TimingRuleTests : RuleTable
         { [Chart.Aprv(), Chart.Check(peak: 100, end: 24)], [Circumstance.Obstructive], "Caution", "obstructive: under 25" },
         { [Chart.Aprv(low: 0), Chart.Check(peak: 100, end: 9)], [Circumstance.Obstructive], "Urgent", "obstructive: under 10" },
         { [Chart.Aprv(), Chart.Check(peak: 100, end: 59), Method(SettingMethod.FlowGuided)], [], "Caution", "flow-guided: under 60" },
+        { [Chart.Aprv(), .. Ends(78, 77, 67, 65), Method(SettingMethod.FlowGuided)], [], "Caution", "flow-guided: under the target of 75 twice and 10 points under the median of 77.5" },
+        { [Chart.Aprv(), .. Ends(78, 77, 68, 65), Method(SettingMethod.FlowGuided)], [], Clear, "only once by 10 points" },
+        { [Chart.Aprv(), .. Ends(88, 87, 76, 75), Method(SettingMethod.FlowGuided)], [], Clear, "by 11 points, but not under the target" },
+        { [Chart.Aprv(), .. Ends(67, 65), Method(SettingMethod.FlowGuided)], [], Clear, "nothing to have fallen from" },
+        { [Chart.Aprv(), .. Ends(78, 77, 67, 65).Select(c => c with { FlowReadings = 1 }), Method(SettingMethod.FlowGuided)], [], "Advisory", "fallen, one release" },
         { [Chart.Aprv(), Chart.Check(peak: 100, end: 40), Method(SettingMethod.TwoLevel)], [], CannotTell, "two levels are not judged" },
         { [Chart.Aprv(), Chart.Check(peak: 100, end: 52), Target(t => t with { EndReleaseFlowPercent = 60 })], [], "Caution", "own target 60: edge 55" },
         { [Chart.Aprv(), Chart.Check(peak: null, end: null)], [], CannotTell, "no flows" },
@@ -132,6 +137,10 @@ public sealed class TimingRuleTests : RuleTable
 
     [Theory, MemberData(nameof(R11))]
     public void R11_PressureLowHolds(Entry[] chart, Circumstance[] context, string expected, string reason) => Holds("R11", chart, context, expected, reason);
+
+    /// <summary>Checks every two hours.</summary>
+    private static IEnumerable<VentilatorCheck> Ends(params decimal[] percent) =>
+        percent.Select((end, i) => Chart.Check(25 + 120 * (percent.Length - 1 - i), peak: 100, end: end));
 
     private static VentilatorCheck Short(decimal endPercent, decimal release = 380) => Chart.Check(peak: 100, end: endPercent, release: release);
 

@@ -5,7 +5,7 @@ namespace UnitVent.Charting.Tests.Stories;
 
 public sealed class TimingStoryTests
 {
-    /// <summary>A release that ends early is said once the gas shows it; after T low was lengthened too far the other edge is.</summary>
+    /// <summary>A release that ends early is said once the gas shows it; after T low was lengthened too far the other edge is, and the fall still when it has passed the edge.</summary>
     [Fact]
     public void ReleaseEndsEarly_ThenLate()
     {
@@ -19,7 +19,7 @@ public sealed class TimingStoryTests
         story.At(9, Flow(65)).Stands();
         story.At(10, Chart.Aprv(tLow: 0.8m), Flow(40)).Stands("R01 Caution");
         story.At(17).Stands("R01 Caution");
-        story.At(18, Chart.Aprv(tLow: 0.7m), Flow(48)).Stands("R01 Advisory");
+        story.At(18, Chart.Aprv(tLow: 0.7m), Flow(48)).Stands("R01 Caution");
         story.At(20, Chart.Aprv(tLow: 0.6m), Flow(55)).Stands();
     }
 

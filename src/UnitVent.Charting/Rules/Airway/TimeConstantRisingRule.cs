@@ -17,7 +17,7 @@ public sealed class TimeConstantRisingRule : Rule
     public override string Seen => "expiratory time constant rising at the same settings";
 
     /// <inheritdoc/>
-    public override string Levels => "a drift by 35 % caution";
+    public override string Levels => "a drift by 35 % advisory; caution when its direction is sure (p ≤ 0.02)";
 
     /// <inheritdoc/>
     public override string Remarks => "Needs four valid checks over 4 h since pressures and times were last changed.";
@@ -52,7 +52,7 @@ public sealed class TimeConstantRisingRule : Rule
         var (before, after) = (drift.StartMedian!.Value, drift.Points[^1].Value);
         var flow = picture[ValueNames.EndReleaseFlowPercent].Value;
         return Raise(
-            Severity.Caution,
+            ReleaseDrift.Level(drift),
             $"time constant {Numbers.Fixed(before, 2)} → {Numbers.Fixed(after, 2)} s in {Times.Hours(drift.Span)}, {drift.Count} checks at the same settings"
             + (flow is { } percent ? $"; release ended at {Numbers.Fixed(percent)} % of peak" : ""),
             "secretions, bronchospasm, kink, wet filter",

@@ -12,6 +12,6 @@ public sealed record ComplianceFallingOptions
     public double EndFlowFromPercent { get; init; } = 5;
 
     /// <summary>Gets the end-release flow above which a check does not count.</summary>
-    [Threshold("end-release flow above which a check does not count", 50, 80, Unit = "% of peak")]
-    public double EndFlowToPercent { get; init; } = 65;
+    [Threshold("end-release flow above which a check does not count", 50, 90, Unit = "% of peak")]
+    public double EndFlowToPercent { get; init; } = 80;
 }

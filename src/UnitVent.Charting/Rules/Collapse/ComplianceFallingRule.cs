@@ -17,7 +17,7 @@ public sealed class ComplianceFallingRule : Rule
     public override string Seen => "effective compliance falling at the same pressures";
 
     /// <inheritdoc/>
-    public override string Levels => "a drift by 20 % caution";
+    public override string Levels => "a drift by 20 % advisory; caution when its direction is sure (p ≤ 0.02)";
 
     /// <inheritdoc/>
     public override string Remarks => "Needs four valid checks over 4 h since P high or P low was last changed; quiet with effort during the release or a leak.";
@@ -56,7 +56,7 @@ public sealed class ComplianceFallingRule : Rule
     {
         var (before, after) = (drift.StartMedian!.Value, drift.Points[^1].Value);
         return Raise(
-            Severity.Caution,
+            ReleaseDrift.Level(drift),
             $"effective compliance {Numbers.Fixed(before)} → {Numbers.Fixed(after)} mL/cmH2O in {Times.Hours(drift.Span)}, {drift.Count} checks at the same pressures",
             "P/F and SpO2, secretions, tube position, effusion, pneumothorax, abdominal pressure, fluid balance",
             drift.Points[^1].At,

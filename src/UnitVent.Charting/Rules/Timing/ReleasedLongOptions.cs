@@ -23,6 +23,10 @@ public sealed record ReleasedLongOptions
     [Threshold("how far below the target is an advisory when the flow trace guides", 2, 25, Unit = "points")]
     public double FlowGuidedAdvisoryBelow { get; init; } = 10;
 
+    /// <summary>Gets the fall against the median of the hours before that is a caution under the target.</summary>
+    [Threshold("fall against the median of the hours before that is a caution under the target", 5, 30, Unit = "points")]
+    public double FallPoints { get; init; } = 10;
+
     /// <summary>Gets the flow under which it is urgent with a low P low.</summary>
     [Threshold("flow under which it is urgent with a low P low", 10, 40, Unit = "% of peak", Urgent = true)]
     public double UrgentUnder { get; init; } = 25;
