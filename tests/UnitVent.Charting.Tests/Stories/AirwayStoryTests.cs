@@ -5,7 +5,7 @@ namespace UnitVent.Charting.Tests.Stories;
 
 public sealed class AirwayStoryTests
 {
-    /// <summary>The lung empties more and more slowly, at first not surely; one better check after suction is not yet the end of it, two are.</summary>
+    /// <summary>The lung empties more and more slowly, at first not surely; one better check after suction makes it less sure, two end it.</summary>
     [Fact]
     public void AirwayNarrows_ThenIsCleared()
     {
@@ -19,7 +19,7 @@ public sealed class AirwayStoryTests
         story.At(10, Flow(69)).Stands("R59 Advisory");
         story.At(12, Flow(72)).Stands("R59 Caution");
         story.At(13, new BedsideEvent { What = EventKind.Suction }).Stands("R59 Caution");
-        story.At(14, Flow(61)).Stands("R59 Caution");
+        story.At(14, Flow(61)).Stands("R59 Advisory");
         story.At(16, Flow(60)).Stands();
     }
 
