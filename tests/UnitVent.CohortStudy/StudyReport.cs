@@ -8,7 +8,17 @@ namespace UnitVent.CohortStudy;
 internal static class StudyReport
 {
     public static IEnumerable<string> Of(IReadOnlyList<CohortCourse> courses) =>
-        [.. Planted([.. courses.Where(c => c.Planted is not null)]), "", .. Quiet([.. courses.Where(c => c.Planted is null)])];
+        [.. Planted([.. courses.Where(c => c.Planted is not null)]), "", .. Quiet([.. courses.Where(c => c.Planted is null)]), "", .. Fits()];
+
+    private static IEnumerable<string> Fits()
+    {
+        yield return "| planted | cards that count as having found it | because |";
+        yield return "| --- | --- | --- |";
+        foreach (var kind in PlantedKind.All)
+        {
+            yield return $"| {kind.What} | {string.Join(", ", kind.Fits)} | {kind.Because} |";
+        }
+    }
 
     private static IEnumerable<string> Planted(IReadOnlyList<CohortCourse> courses)
     {
@@ -26,7 +36,7 @@ internal static class StudyReport
     {
         var (rules, limits) = (courses.Select(c => c.FoundByRules).OfType<Found>().ToList(), courses.Select(c => c.FoundByLimits).OfType<Found>().ToList());
         return Invariant(
-            $"| {what} | {matters} | {courses.Count} | {rules.Count} ({Share(rules.Count, courses.Count)}) | {Median(rules.Select(f => f.Hours)):0.0} | {Median(rules.Select(f => (double)f.Gases)):0.#} | {Led(rules)} | {limits.Count} ({Share(limits.Count, courses.Count)}) | {Median(limits.Select(f => f.Hours)):0.0} | {Led(limits)} |");
+            $"| {what} | {matters} | {courses.Count} | {rules.Count} ({Share(rules.Count, courses.Count)}) | {Median(rules.Select(f => f.Hours))} | {Median(rules.Select(f => (double)f.Gases))} | {Led(rules)} | {limits.Count} ({Share(limits.Count, courses.Count)}) | {Median(limits.Select(f => f.Hours))} | {Led(limits)} |");
     }
 
     private static IEnumerable<string> Quiet(IReadOnlyList<CohortCourse> courses)
@@ -66,10 +76,10 @@ internal static class StudyReport
 
     private static string Share(int part, int whole) => whole == 0 ? "–" : Invariant($"{100.0 * part / whole:0} %");
 
-    private static double Median(IEnumerable<double> values)
+    private static string Median(IEnumerable<double> values)
     {
         var sorted = values.Order().ToList();
-        return sorted.Count == 0 ? double.NaN : (sorted[(sorted.Count - 1) / 2] + sorted[sorted.Count / 2]) / 2;
+        return sorted.Count == 0 ? "–" : Invariant($"{(sorted[(sorted.Count - 1) / 2] + sorted[sorted.Count / 2]) / 2:0.#}");
     }
 
     private static string Invariant(FormattableString text) => text.ToString(CultureInfo.InvariantCulture);

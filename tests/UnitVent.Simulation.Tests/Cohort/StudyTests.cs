@@ -34,7 +34,7 @@ public sealed class StudyTests
 
     [Fact]
     public void Study_WhatWasPlanted_IsFound() =>
-        Assert.All(Once.Value.Where(c => c.Planted?.Kind is Deterioration.ReleaseLengthened or Deterioration.ShuntRising or Deterioration.BicarbonateSlip or Deterioration.Pneumothorax), c => Assert.True(c.FoundByRules is not null, $"{c.Planted!.What} was not found."));
+        Assert.All(Once.Value.Where(c => c.Planted is not null), c => Assert.True(c.FoundByRules is not null, $"{c.Planted!.What} was not found."));
 
     /// <summary>Sixteen are too few to measure by: at most a card every third day, where the whole study counts one in nine.</summary>
     [Fact]
