@@ -110,7 +110,7 @@ public sealed class PatientPicture
     public Instant? NextChangeAt { get; }
 
     /// <summary>Gets what drifts, over the unit's window within the present epoch. Computed when first asked for.</summary>
-    public PatientDrifts Drifts => field ??= PatientDrifts.Of(this);
+    public PatientDrifts Drifts => field ??= new PatientDrifts(this);
 
     /// <summary>Gets the valid points behind drifts. Computed when first asked for.</summary>
     internal EpochSeries Series => field ??= new EpochSeries(this);

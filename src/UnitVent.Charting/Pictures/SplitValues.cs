@@ -6,6 +6,15 @@ namespace UnitVent.Charting.Pictures;
 /// <summary>How minute ventilation splits between releases and the patient's own breaths: A10; and the rapid shallow index: A29.</summary>
 internal static class SplitValues
 {
+    public static readonly IReadOnlySet<string> Names = new HashSet<string>
+    {
+        ValueNames.ReleaseMinuteVolumeLMin,
+        ValueNames.SpontaneousMinuteVolumeDerivedLMin,
+        ValueNames.SpontaneousMinuteVolumeLMin,
+        ValueNames.SpontaneousSharePercent,
+        ValueNames.RapidShallowIndex,
+    };
+
     public static IEnumerable<PictureValue> Of(PictureSources s)
     {
         var check = s.CheckWith(c => c is { TotalMinuteVolumeLMin: not null, ReleaseVolumeMl: not null });

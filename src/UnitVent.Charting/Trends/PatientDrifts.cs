@@ -4,57 +4,59 @@ using UnitVent.Charting.Timelines;
 
 namespace UnitVent.Charting.Trends;
 
-/// <summary>What drifts in one patient, over the unit's window within the present epoch.</summary>
-/// <param name="From">From when points count: the window's length ago, or when mode, position, relaxant, ECMO or a drain last changed.</param>
-/// <param name="To">Until when.</param>
-/// <param name="All">The verdict on every quantity of <see cref="DriftVariables"/>, in its order.</param>
-/// <param name="SettingChanges">What settings changed in that time, oldest first.</param>
-public sealed record PatientDrifts(Instant From, Instant To, IReadOnlyList<Drift> All, IReadOnlyList<TimelineMark> SettingChanges)
+/// <summary>What drifts in one patient, over the unit's window within the present epoch. Each verdict is worked out when it is asked for.</summary>
+public sealed class PatientDrifts
 {
     private const double Alkalaemia = 7.45;
 
+    private readonly PatientPicture picture;
+    private readonly Dictionary<string, Lazy<Drift>> verdicts;
+
+    internal PatientDrifts(PatientPicture picture)
+    {
+        this.picture = picture;
+        verdicts = Quantities(picture.Series).ToDictionary(q => q.Variable.Name, q => new Lazy<Drift>(() => Drift.Of(q.Points(), q.Variable)));
+    }
+
+    /// <summary>Gets from when points count: the window's length ago, or when mode, position, relaxant, ECMO or a drain last changed.</summary>
+    public Instant From => picture.Series.From;
+
+    /// <summary>Gets until when.</summary>
+    public Instant To => picture.AsOf;
+
+    /// <summary>Gets the verdict on every quantity of <see cref="DriftVariables"/>, in its order.</summary>
+    public IReadOnlyList<Drift> All => [.. verdicts.Values.Select(v => v.Value)];
+
+    /// <summary>Gets what settings changed in that time, oldest first.</summary>
+    public IReadOnlyList<TimelineMark> SettingChanges => field ??= [.. TimelineMarks.SettingChanges(picture.Window, From, To).Where(c => c.At > From)];
+
     /// <summary>Gets the verdict on a quantity.</summary>
     /// <param name="name">Its <see cref="DriftVariable.Name"/>.</param>
-    /// <exception cref="InvalidOperationException">There is no such quantity.</exception>
-    public Drift this[string name] => All.First(d => d.Variable.Name == name);
+    /// <exception cref="KeyNotFoundException">There is no such quantity.</exception>
+    public Drift this[string name] => verdicts[name].Value;
 
     /// <summary>What settings changed between the first and the last point of a verdict; none makes it a drift at the same settings.</summary>
     public IEnumerable<TimelineMark> SettingChangesDuring(Drift drift) =>
         drift.Count == 0 ? [] : SettingChanges.Where(c => c.At >= drift.Points[0].At && c.At < drift.Points[^1].At);
 
-    internal static PatientDrifts Of(PatientPicture picture)
+    private IEnumerable<(DriftVariable Variable, Func<IEnumerable<SeriesPoint>> Points)> Quantities(EpochSeries series)
     {
-        var (window, to) = (picture.Window, picture.AsOf);
-        var series = picture.Series;
         var alkalaemic = (double?)picture.LatestGas?.Gas.Body.PH > Alkalaemia;
-        return new(
-            series.From,
-            to,
-            [.. Gases(series, alkalaemic), .. Checks(series)],
-            [.. TimelineMarks.SettingChanges(window, series.From, to).Where(c => c.At > series.From)]);
-    }
-
-    private static IEnumerable<Drift> Gases(EpochSeries series, bool alkalaemic)
-    {
-        yield return Drift.Of(series.OfOxygen(ValueNames.PfRatio), DriftVariables.PfRatio);
-        yield return Drift.Of(series.OfOxygen(ValueNames.OxygenationIndex), DriftVariables.OxygenationIndex);
-        yield return Drift.Of(
-            series.OfCarbonDioxide(g => GasPairing.Tension(g.Gas, "pCO2", "PaCO2", b => b.PCO2).Value),
-            alkalaemic ? DriftVariables.PaCO2 with { Worse = WorseWhen.Falling } : DriftVariables.PaCO2);
-        yield return Drift.Of(series.OfCarbonDioxide(g => (double?)g.Gas.Body.PH), DriftVariables.PH);
-        yield return Drift.Of(series.OfCarbonDioxide(g => series.AtDraw(g, ValueNames.BicarbonateComputedMmolL)), DriftVariables.Bicarbonate);
-        yield return Drift.Of(series.OfCarbonDioxide(g => series.AtDraw(g, ValueNames.StandardBaseExcessMmolL)), DriftVariables.BaseExcess);
-        yield return Drift.Of(series.OfCarbonDioxide(g => series.WithCheck(g, ValueNames.VentilatoryRatio)), DriftVariables.VentilatoryRatio);
-    }
-
-    private static IEnumerable<Drift> Checks(EpochSeries series)
-    {
-        yield return Drift.Of(series.Saturation(), DriftVariables.SpO2);
-        yield return Drift.Of(series.OfChecks(c => c.MeanPressure.Value), DriftVariables.MeanAirwayPressure);
-        yield return Drift.Of(series.OfChecks(c => c[ValueNames.ReleaseVolumePerKg]?.Value), DriftVariables.ReleaseVolume);
-        yield return Drift.Of(series.Mechanics(ValueNames.EffectiveCompliance), DriftVariables.EffectiveCompliance);
-        yield return Drift.Of(series.Mechanics(ValueNames.ExpiratoryTimeConstantS), DriftVariables.TimeConstant);
-        yield return Drift.Of(series.Mechanics(ValueNames.EndReleaseFlowPercent), DriftVariables.EndReleaseFlow);
-        yield return Drift.Of(series.OfChecks(c => c[ValueNames.SpontaneousSharePercent]?.Value), DriftVariables.OwnShare);
+        yield return (DriftVariables.PfRatio, () => series.OfOxygen(ValueNames.PfRatio));
+        yield return (DriftVariables.OxygenationIndex, () => series.OfOxygen(ValueNames.OxygenationIndex));
+        yield return (
+            alkalaemic ? DriftVariables.PaCO2 with { Worse = WorseWhen.Falling } : DriftVariables.PaCO2,
+            () => series.OfCarbonDioxide(g => GasPairing.Tension(g.Gas, "pCO2", "PaCO2", b => b.PCO2).Value));
+        yield return (DriftVariables.PH, () => series.OfCarbonDioxide(g => (double?)g.Gas.Body.PH));
+        yield return (DriftVariables.Bicarbonate, () => series.OfCarbonDioxide(g => series.AtDraw(g, ValueNames.BicarbonateComputedMmolL)));
+        yield return (DriftVariables.BaseExcess, () => series.OfCarbonDioxide(g => series.AtDraw(g, ValueNames.StandardBaseExcessMmolL)));
+        yield return (DriftVariables.VentilatoryRatio, () => series.OfCarbonDioxide(g => series.WithCheck(g, ValueNames.VentilatoryRatio)));
+        yield return (DriftVariables.SpO2, series.Saturation);
+        yield return (DriftVariables.MeanAirwayPressure, () => series.OfChecks(c => c.MeanPressure.Value));
+        yield return (DriftVariables.ReleaseVolume, () => series.OfChecks(c => c[ValueNames.ReleaseVolumePerKg]?.Value));
+        yield return (DriftVariables.EffectiveCompliance, () => series.Mechanics(ValueNames.EffectiveCompliance));
+        yield return (DriftVariables.TimeConstant, () => series.Mechanics(ValueNames.ExpiratoryTimeConstantS));
+        yield return (DriftVariables.EndReleaseFlow, () => series.Mechanics(ValueNames.EndReleaseFlowPercent));
+        yield return (DriftVariables.OwnShare, () => series.OfChecks(c => c[ValueNames.SpontaneousSharePercent]?.Value));
     }
 }
