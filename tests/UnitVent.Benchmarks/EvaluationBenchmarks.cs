@@ -98,13 +98,30 @@ public class EvaluationBenchmarks
 
     private static VentilatorCheck Check(Instant at) => new()
     {
-        ObservedAt = at, SettingsConfirmed = true, TotalMinuteVolumeLMin = 7, ReleaseVolumeMl = 420, ReleasesAveraged = 3, FlowReadings = 3, PeakExpiratoryFlowLMin = 60,
-        EndReleaseFlowLMin = 36, SpO2Percent = 94, MeanArterialPressureMmHg = 74, MeanAirwayPressureCmH2O = 24, SpontaneousRatePerMin = 12,
+        ObservedAt = at,
+        SettingsConfirmed = true,
+        TotalMinuteVolumeLMin = 7,
+        ReleaseVolumeMl = 420,
+        ReleasesAveraged = 3,
+        FlowReadings = 3,
+        PeakExpiratoryFlowLMin = 60,
+        EndReleaseFlowLMin = 36,
+        SpO2Percent = 94,
+        MeanArterialPressureMmHg = 74,
+        MeanAirwayPressureCmH2O = 24,
+        SpontaneousRatePerMin = 12,
     };
 
     private static BloodGas Gas(Instant at, decimal pO2) => new()
     {
-        DrawnAt = at, Specimen = Specimen.Arterial, TensionUnit = TensionUnit.MmHg, PH = 7.37m, PCO2 = 45, PO2 = pO2, BicarbonateMmolL = 25.5m, HaemoglobinGDl = 10,
+        DrawnAt = at,
+        Specimen = Specimen.Arterial,
+        TensionUnit = TensionUnit.MmHg,
+        PH = 7.37m,
+        PCO2 = 45,
+        PO2 = pO2,
+        BicarbonateMmolL = 25.5m,
+        HaemoglobinGDl = 10,
     };
 
     private sealed class OnceAnIteration : ManualConfig

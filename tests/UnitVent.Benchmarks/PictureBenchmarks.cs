@@ -50,18 +50,40 @@ public class PictureBenchmarks
 
     private static SettingChange Settings(Instant at, int i) => new()
     {
-        ChangedAt = at, Mode = VentilationMode.Aprv, PHighCmH2O = 28 - (i % 3), PLowCmH2O = 0, THighS = 4.5m, TLowS = 0.5m, FiO2 = 0.5m,
+        ChangedAt = at,
+        Mode = VentilationMode.Aprv,
+        PHighCmH2O = 28 - (i % 3),
+        PLowCmH2O = 0,
+        THighS = 4.5m,
+        TLowS = 0.5m,
+        FiO2 = 0.5m,
     };
 
     private static BloodGas Gas(Instant at, int i) => new()
     {
-        DrawnAt = at, Specimen = Specimen.Arterial, TensionUnit = TensionUnit.MmHg, PH = 7.34m, PCO2 = 46 + (i % 5), PO2 = 75 + (i % 7), BicarbonateMmolL = 25.1m, HaemoglobinGDl = 10,
+        DrawnAt = at,
+        Specimen = Specimen.Arterial,
+        TensionUnit = TensionUnit.MmHg,
+        PH = 7.34m,
+        PCO2 = 46 + (i % 5),
+        PO2 = 75 + (i % 7),
+        BicarbonateMmolL = 25.1m,
+        HaemoglobinGDl = 10,
         SO2Percent = 94,
     };
 
     private static VentilatorCheck Check(Instant at, int i) => new()
     {
-        ObservedAt = at, SettingsConfirmed = true, TotalMinuteVolumeLMin = 8, ReleaseVolumeMl = 400 + (i % 9), ReleasesAveraged = 3, FlowReadings = 3, PeakExpiratoryFlowLMin = 60,
-        EndReleaseFlowLMin = 36, SpO2Percent = 94, MeanArterialPressureMmHg = 74, MeanAirwayPressureCmH2O = 25,
+        ObservedAt = at,
+        SettingsConfirmed = true,
+        TotalMinuteVolumeLMin = 8,
+        ReleaseVolumeMl = 400 + (i % 9),
+        ReleasesAveraged = 3,
+        FlowReadings = 3,
+        PeakExpiratoryFlowLMin = 60,
+        EndReleaseFlowLMin = 36,
+        SpO2Percent = 94,
+        MeanArterialPressureMmHg = 74,
+        MeanAirwayPressureCmH2O = 25,
     };
 }

@@ -8,18 +8,35 @@ public sealed class EquationTests
 {
     private static readonly BloodGas WholeGas = Chart.Gas() with
     {
-        HaemoglobinGDl = 9.8m, SO2Percent = 93.5m, SodiumMmolL = 141, ChlorideMmolL = 104, EtCO2MmHg = 39,
+        HaemoglobinGDl = 9.8m,
+        SO2Percent = 93.5m,
+        SodiumMmolL = 141,
+        ChlorideMmolL = 104,
+        EtCO2MmHg = 39,
     };
 
     private static readonly VentilatorCheck WholeCheck = Chart.Check() with
     {
-        MeanAirwayPressureCmH2O = 25.2m, TotalRatePerMin = 20, SpontaneousRatePerMin = 14, SpontaneousTidalVolumeMl = 210, PeakPressureCmH2O = 31, PlateauPressureCmH2O = 26,
-        TidalVolumeMl = 430, Passive = true, HoldS = 0.6m,
+        MeanAirwayPressureCmH2O = 25.2m,
+        TotalRatePerMin = 20,
+        SpontaneousRatePerMin = 14,
+        SpontaneousTidalVolumeMl = 210,
+        PeakPressureCmH2O = 31,
+        PlateauPressureCmH2O = 26,
+        TidalVolumeMl = 430,
+        Passive = true,
+        HoldS = 0.6m,
     };
 
     private static readonly SettingChange VolumeControl = new()
     {
-        ChangedAt = Chart.Ago(600), Mode = VentilationMode.VolumeControl, SetRatePerMin = 20, TidalVolumeMl = 430, PeepCmH2O = 10, InspiratoryTimeS = 1.1m, FiO2 = 0.5m,
+        ChangedAt = Chart.Ago(600),
+        Mode = VentilationMode.VolumeControl,
+        SetRatePerMin = 20,
+        TidalVolumeMl = 430,
+        PeepCmH2O = 10,
+        InspiratoryTimeS = 1.1m,
+        FiO2 = 0.5m,
     };
 
     public static TheoryData<string> Situations => [.. Charts.Keys];

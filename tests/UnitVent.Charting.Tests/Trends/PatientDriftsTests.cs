@@ -24,7 +24,7 @@ public sealed class PatientDriftsTests
         Assert.All(drifts.All, d => Assert.Equal((DriftVerdict.NotEnoughData, 0), (d.Verdict, d.Count)));
         Assert.Equal((Chart.Ago(24 * Hour), Chart.Now), (drifts.From, drifts.To));
         Assert.All(drifts.All, d => Assert.NotEmpty(d.Variable.Source));
-        Assert.Throws<InvalidOperationException>(() => drifts["unknown"]);
+        Assert.Throws<KeyNotFoundException>(() => drifts["unknown"]);
     }
 
     [Fact]
