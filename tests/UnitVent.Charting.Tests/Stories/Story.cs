@@ -28,6 +28,28 @@ internal sealed class Story(params Family[] about)
         return this;
     }
 
+    /// <summary>Somebody takes what a rule raised in hand for an hour.</summary>
+    public Story TakenInHand(double hour, string rule)
+    {
+        var at = Begin + Duration.FromHours(hour);
+        open = [.. open.Select(f => f.Finding.Rule == rule ? f with { InHand = new(at, "Tester", null, at + Duration.FromHours(1), null, null) } : f)];
+        return this;
+    }
+
+    /// <summary>Whether what a rule raised is in hand.</summary>
+    public Story IsInHand(string rule, bool expected)
+    {
+        Assert.Equal(expected, open.Single(f => f.Finding.Rule == rule).InHand is not null);
+        return this;
+    }
+
+    /// <summary>What a rule says.</summary>
+    public Story Says(string rule, string words)
+    {
+        Assert.Contains(words, open.Single(f => f.Finding.Rule == rule).Finding.Says, StringComparison.Ordinal);
+        return this;
+    }
+
     /// <summary>What stands open then, as "R01 Caution", in any order.</summary>
     public Story Stands(params string[] expected)
     {
