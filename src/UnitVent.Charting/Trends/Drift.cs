@@ -35,7 +35,8 @@ public sealed record Drift
         double[] values = [.. points.Select(p => p.Value)];
         Line = TheilSen.Of(hours, values, 1 - Level);
         Trend = MannKendall.Of(values);
-        Verdict = Trend.P > Level ? DriftVerdict.None
+        Jump = Step.Of(points.SkipLast(1), points[^1]) is { } step && Math.Abs(step.After - step.Before) >= variable.StepMinimum.From(step.Before) - RoundingSlack ? step : null;
+        Verdict = Trend.P > Level ? (Jump is null ? DriftVerdict.None : DriftVerdict.Jump)
             : Math.Abs(Change!.Value) >= variable.TrendMinimum.From(StartMedian!.Value) - RoundingSlack ? DriftVerdict.Drifting
             : DriftVerdict.SteadySmallChange;
     }
@@ -61,6 +62,9 @@ public sealed record Drift
     /// <summary>Gets the test for a movement one way; null without enough data.</summary>
     public MannKendall? Trend { get; }
 
+    /// <summary>Gets the step of the last point against the median of the 12 h before it, when it is as large as matters for a step; null when it is not.</summary>
+    public Step? Jump { get; }
+
     /// <summary>Gets the change over the span by the line, in the unit of the quantity; null without enough data.</summary>
     public double? Change => Line?.SlopePerHour * Span.TotalHours;
 
@@ -69,13 +73,13 @@ public sealed record Drift
 
     /// <summary>Gets which way it moves.</summary>
     public DriftDirection Direction => Verdict is DriftVerdict.NotEnoughData or DriftVerdict.None ? DriftDirection.Level
-        : Trend!.Score > 0 ? DriftDirection.Up
+        : (Verdict == DriftVerdict.Jump ? Jump!.After - Jump.Before : Trend!.Score) > 0 ? DriftDirection.Up
         : DriftDirection.Down;
 
     /// <summary>Gets what the movement means.</summary>
     public DriftCourse Course => Direction == DriftDirection.Level ? DriftCourse.Level
         : Variable.Worse == WorseWhen.Either ? DriftCourse.Either
-        : Variable.Worsening(Line!.Intercept, Line.Intercept + Change!.Value) > 0 ? DriftCourse.Worse
+        : (Verdict == DriftVerdict.Jump ? Variable.Worsening(Jump!.Before, Jump.After) : Variable.Worsening(Line!.Intercept, Line.Intercept + Change!.Value)) > 0 ? DriftCourse.Worse
         : DriftCourse.Better;
 
     /// <summary>Gets how much data the verdict rests on; null without enough.</summary>

@@ -9,6 +9,9 @@ public enum DriftVerdict
     /// <summary>No more order in time than chance makes.</summary>
     None,
 
+    /// <summary>No order in time, but the last value stands off the ones before by as much as matters for a step.</summary>
+    Jump,
+
     /// <summary>It moves one way, but by less than matters.</summary>
     SteadySmallChange,
 

@@ -13,12 +13,14 @@ public sealed class DriftTests
         { [0, 4, 8, 12], [200, 180, 160, 140], DriftVerdict.Drifting, "four points, all falling" },
         { [0, 1, 2, 3.99], [200, 180, 160, 140], DriftVerdict.NotEnoughData, "36 s short of four hours" },
         { [0, 1, 2, 4], [200, 180, 160, 140], DriftVerdict.Drifting, "four hours" },
-        { [0, 4, 8, 12], [200, 180, 185, 140], DriftVerdict.None, "four points, one out of order: S = −4" },
+        { [0, 4, 8, 12], [200, 180, 185, 140], DriftVerdict.Jump, "four points, one out of order: S = −4; the last is 24 % under the median before" },
         { [0, 4, 8, 12, 16], [200, 180, 185, 160, 140], DriftVerdict.Drifting, "five points, one out of order: S = −8" },
-        { [0, 4, 8, 12, 16], [200, 180, 185, 190, 140], DriftVerdict.None, "five points, three out of order: S = −4" },
+        { [0, 4, 8, 12, 16], [200, 180, 185, 190, 140], DriftVerdict.Jump, "five points, three out of order: S = −4; the last is 24 % under the median of 12 h" },
         { [0, 4, 8, 12], [210, 200, 190, 180], DriftVerdict.Drifting, "a fall of 30 is 15 % of the starting median 200" },
         { [0, 4, 8, 12], [210, 200.1, 190.2, 180.3], DriftVerdict.SteadySmallChange, "a fall of 29.7 is less" },
         { [0, 4, 8, 12], [180, 180, 180, 180], DriftVerdict.None, "nothing moves" },
+        { [0, 4, 8, 12], [180, 200, 180, 144.1], DriftVerdict.None, "a last value just under a fifth lower" },
+        { [0, 4, 8, 12], [180, 200, 180, 144], DriftVerdict.Jump, "a last value a fifth lower" },
         { [], [], DriftVerdict.NotEnoughData, "no points" },
     };
 
@@ -145,7 +147,7 @@ public sealed class DriftTests
 
         Assert.Equal((drift.Verdict, drift.Course, drift.Trend), (moved.Verdict, moved.Course, moved.Trend));
         Assert.True(drift.Verdict != DriftVerdict.Drifting || Math.Abs(drift.Change!.Value) >= 0.15 * drift.StartMedian - 1e-9);
-        Assert.True(drift.Verdict is DriftVerdict.NotEnoughData || drift.Trend!.P <= Drift.Level == drift.Verdict is not DriftVerdict.None);
+        Assert.True(drift.Verdict is DriftVerdict.NotEnoughData || drift.Trend!.P <= Drift.Level == drift.Verdict is not (DriftVerdict.None or DriftVerdict.Jump));
     });
 
     internal static Drift Of(DriftVariable variable, double[] hours, double[] values) =>
