@@ -120,7 +120,7 @@ need() {
 need_dotnet() {
   command -v dotnet >/dev/null && dotnet --version >/dev/null 2>&1 && return
   die "The .NET SDK $(sed -n 's/.*"sdk":.*"version": *"\([^"]*\)".*/\1/p' global.json) or newer of that line is missing." \
-    "Please install it: https://dotnet.microsoft.com/download"
+    "Please install it, from this system's packages or from its makers."
 }
 
 # The SDK keeps its caches in the home folder; without one they go into the checkout's ignored folder.
