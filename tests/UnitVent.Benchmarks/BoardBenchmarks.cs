@@ -5,6 +5,7 @@ using Microsoft.EntityFrameworkCore;
 using Microsoft.Extensions.DependencyInjection;
 using Microsoft.Extensions.Logging.Abstractions;
 using UnitVent.Charting.Flags;
+using UnitVent.Charting.Windows;
 using UnitVent.Store.Reading;
 using UnitVent.Web.Board;
 
@@ -53,7 +54,7 @@ public class BoardBenchmarks
         var (db, unit) = (demo!.Db, demo.UnitId);
         await WindowLoader.ProfileAsync(db, unit, demo.Now, CancellationToken.None);
         var episodes = await WindowLoader.EpisodesAsync(db, unit, e => e.EndedAt == null, CancellationToken.None);
-        var entries = await WindowLoader.EntriesAsync(db, unit, [.. episodes.Select(e => e.Id)], demo.Now - WindowLoader.Span, demo.Now, CancellationToken.None);
+        var entries = await WindowLoader.EntriesAsync(db, unit, [.. episodes.Select(e => e.Id)], demo.Now - ChartWindow.Span, demo.Now, CancellationToken.None);
         var flags = await db.Flags.AsNoTracking().Where(f => f.UnitId == unit && f.State == FlagState.Open).ToListAsync();
         return episodes.Count + entries.Count + flags.Count;
     }

@@ -2,6 +2,7 @@ using System.Data;
 using Microsoft.EntityFrameworkCore;
 using NodaTime;
 using Npgsql;
+using UnitVent.Charting.Windows;
 
 namespace UnitVent.Benchmarks;
 
@@ -54,7 +55,7 @@ internal sealed class HandWrittenBoard : IAsyncDisposable
             command.Parameters.Add(new NpgsqlParameter<Guid> { TypedValue = demo.UnitId });
             if (text == Entries)
             {
-                command.Parameters.Add(new NpgsqlParameter<Instant> { TypedValue = demo.Now - Duration.FromHours(48) });
+                command.Parameters.Add(new NpgsqlParameter<Instant> { TypedValue = demo.Now - ChartWindow.Span });
                 command.Parameters.Add(new NpgsqlParameter<Instant> { TypedValue = demo.Now });
             }
 

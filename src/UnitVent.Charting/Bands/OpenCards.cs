@@ -9,13 +9,11 @@ internal static class OpenCards
     private static readonly Family[] ExplainedBySuddenChange =
         [Family.Timing, Family.Airway, Family.Collapse, Family.Drive, Family.Effort, Family.CarbonDioxide, Family.Oxygen, Family.VolumeAndPressure, Family.Circulation];
 
-    private static readonly string[] OnlyWithoutCaution = ["R37", "R38"];
-
     /// <summary>The cards, the leading one first. Left out are what rests on a setting and was heard, what is for the due list only, and what matches criteria while a caution is open.</summary>
     public static List<Card> Of(IReadOnlyList<Flag> open)
     {
         var alarming = open.Any(f => f.Finding.Severity >= Severity.Caution);
-        var said = open.Where(f => !f.IsHeard && !IsDueListOnly(f.Finding) && !(alarming && OnlyWithoutCaution.Contains(f.Finding.Rule))).ToList();
+        var said = open.Where(f => !f.IsHeard && !IsDueListOnly(f.Finding) && !(alarming && RuleSet.Of(f.Finding.Rule).OnlyWithoutCaution)).ToList();
         return [.. said
             .GroupBy(f => FamilyOf(f.Finding, said))
             .Select(g => new Card(g.Key, [.. g.OrderByDescending(f => f.Finding.Severity).ThenByDescending(f => f.Finding.SeenAt)]))
@@ -24,20 +22,13 @@ internal static class OpenCards
             .ThenByDescending(c => c.Leading.Finding.SeenAt)];
     }
 
-    /// <summary>A sudden change takes in what the same check shows; a long release explains a collapse, a short one a narrow airway, a fallen minute volume rising carbon dioxide.</summary>
+    /// <summary>A sudden change takes in what the same check shows; else a finding joins the card of what it explains.</summary>
     private static Family FamilyOf(Finding finding, List<Flag> open) =>
         ExplainedBySuddenChange.Contains(finding.Family) && open.Any(f => f.Finding.Family == Family.Sudden && OnSameEntry(f.Finding, finding)) ? Family.Sudden
-        : (finding.Rule, finding.Family) switch
-        {
-            ("R02", _) when Open(open, Family.Airway) => Family.Airway,
-            ("R53", _) when Open(open, Family.CarbonDioxide) => Family.CarbonDioxide,
-            ("R01", _) when Open(open, Family.Collapse) => Family.Collapse,
-            var (_, own) => own,
-        };
+        : RuleSet.Of(finding.Rule).Joins is { } explained && open.Any(f => f.Finding.Family == explained) ? explained
+        : finding.Family;
 
     private static bool IsDueListOnly(Finding finding) => finding is { Family: Family.Due, Severity: Severity.Information };
-
-    private static bool Open(List<Flag> open, Family family) => open.Any(f => f.Finding.Family == family);
 
     private static bool OnSameEntry(Finding one, Finding other) => one.Entries.Count > 0 && other.Entries.Count > 0 && one.Entries[0] == other.Entries[0];
 }

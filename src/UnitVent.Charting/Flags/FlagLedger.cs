@@ -1,6 +1,7 @@
 using NodaTime;
 using UnitVent.Charting.Pictures;
 using UnitVent.Charting.Rules;
+using UnitVent.Charting.Windows;
 
 namespace UnitVent.Charting.Flags;
 
@@ -11,8 +12,8 @@ namespace UnitVent.Charting.Flags;
 /// </remarks>
 public static class FlagLedger
 {
-    // The window holds 48 h of entries: an older entry that is not in it was not struck out, only left behind.
-    private static readonly Duration WindowSureFor = Duration.FromHours(47);
+    // An older entry that is not in the window was not struck out, only left behind.
+    private static readonly Duration WindowSureFor = ChartWindow.Span - Duration.FromHours(1);
 
     /// <summary>What happens to the open flags of an episode in the light of a new picture.</summary>
     /// <param name="open">The open flags.</param>

@@ -8,8 +8,6 @@ namespace UnitVent.Charting.Flags;
 /// <summary>Walks a chart through again as it was recorded and carries flags on at each entry and at each moment that time alone changes.</summary>
 public static class Replay
 {
-    private static readonly Duration WindowSpan = Duration.FromHours(48);
-
     private static readonly EntryKind[] States = [EntryKind.Context, EntryKind.Target, EntryKind.Phase, EntryKind.Method, EntryKind.Event, EntryKind.FollowUp];
 
     /// <summary>Every step of every flag between two instants, as it would have been under the window's thresholds.</summary>
@@ -45,7 +43,7 @@ public static class Replay
     public static ChartWindow Known(ChartWindow whole, Instant at)
     {
         ArgumentNullException.ThrowIfNull(whole);
-        var edge = at - WindowSpan;
+        var edge = at - ChartWindow.Span;
         var known = whole.Standing.Where(e => e.RecordedAt <= at && e.EffectiveAt <= at).ToList();
         var before = known.Where(e => e.EffectiveAt <= edge).ToList();
         return new(

@@ -71,15 +71,11 @@ internal static class ClinicalRefusals
             yield return $"The patient's own breaths carry {Numbers.Fixed(now.Value)} % of the ventilation; releases say little of PaCO2.";
         }
 
-        var before = picture.Window.Latest<VentilatorCheck>(
-            EntryKind.VentilatorCheck, picture.AsOf, c => c is { TotalMinuteVolumeLMin: not null, SpontaneousMinuteVolumeLMin: not null } && c.ObservedAt < picture.Check?.At);
-        if (before is { } b && now is { } share && Math.Abs(share - Share(b.Body)) >= OwnShareThatChanges)
+        if (picture.Series.OfChecks(c => c[ValueNames.SpontaneousSharePercent]?.Value).ToList() is [.., var before, var last] && Math.Abs(last.Value - before.Value) >= OwnShareThatChanges)
         {
-            yield return $"The own share is changing: {Numbers.Fixed(Share(b.Body))} → {Numbers.Fixed(share)} %.";
+            yield return $"The own share is changing: {Numbers.Fixed(before.Value)} → {Numbers.Fixed(last.Value)} %.";
         }
     }
-
-    private static double Share(VentilatorCheck check) => 100 * (double)(check.SpontaneousMinuteVolumeLMin!.Value / check.TotalMinuteVolumeLMin!.Value);
 
     private static IEnumerable<string> Since(PatientPicture picture, Instant gas) =>
         picture.Window.Of<BedsideEvent>(EntryKind.Event, picture.AsOf)

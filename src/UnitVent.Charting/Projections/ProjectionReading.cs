@@ -1,4 +1,5 @@
 using UnitVent.Charting.Checking;
+using UnitVent.Charting.Entries;
 using UnitVent.Charting.Episodes;
 using UnitVent.Charting.Pictures;
 using UnitVent.Charting.Results;
@@ -17,35 +18,26 @@ internal static class ProjectionReading
     public static Result<ReleaseReading> Of(PatientPicture picture, AprvSettings settings)
     {
         var gas = picture.LatestGas!;
-        var check = gas.Check!.Value.Body;
-        var own = OwnVentilation(picture, settings, check);
+        var check = gas.Check!.Value;
+        var values = new CheckValues(picture.Window, check);
+        var ratio = values[ValueNames.EndReleaseFlowPercent]?.Value;
+        var own = values[ValueNames.SpontaneousMinuteVolumeLMin]?.Value ?? (picture.Ongoing.Contains(EventKind.RelaxantStart) ? 0 : null);
+        var weight = BodySize.Predicted(picture.Window.Episode.Patient);
         List<FieldError> missing = [.. Missing(
-            (check.PeakExpiratoryFlowLMin is null || check.EndReleaseFlowLMin is null, "peak and end-release flow"),
-            (check.ReleaseVolumeMl is null, "release volume"),
+            (ratio is null, "peak and end-release flow"),
+            (check.Body.ReleaseVolumeMl is null, "release volume"),
             (own is null, "total or own minute volume"),
-            (own > 0 && check.SpontaneousRatePerMin is null, "own rate"),
-            (BodySize.Predicted(picture.Window.Episode.Patient) is null, "height and sex"))];
-        if (missing.Count > 0)
-        {
-            return Result<ReleaseReading>.Refused(Refusal.Value, missing);
-        }
-
-        return Result<ReleaseReading>.Of(new(
+            (own > 0 && check.Body.SpontaneousRatePerMin is null, "own rate"),
+            (weight is null, "height and sex"))];
+        return missing.Count > 0 ? Result<ReleaseReading>.Refused(Refusal.Value, missing) : Result<ReleaseReading>.Of(new(
             settings,
-            (double)(check.EndReleaseFlowLMin!.Value / check.PeakExpiratoryFlowLMin!.Value),
-            GasVolume.FromMillilitres((double)check.ReleaseVolumeMl!.Value),
+            ratio!.Value / 100,
+            GasVolume.FromMillilitres((double)check.Body.ReleaseVolumeMl!.Value),
             PaCO2(gas),
-            GasVolume.FromMillilitres(DeadSpaceMlPerKg * BodySize.Predicted(picture.Window.Episode.Patient)!.Value.Kilograms),
+            GasVolume.FromMillilitres(DeadSpaceMlPerKg * weight!.Value.Kilograms),
             MinuteVentilation.FromLitresPerMinute(own!.Value),
-            BreathRate.FromPerMinute((double?)check.SpontaneousRatePerMin ?? 0)));
+            BreathRate.FromPerMinute((double?)check.Body.SpontaneousRatePerMin ?? 0)));
     }
-
-    private static double? OwnVentilation(PatientPicture picture, AprvSettings settings, Entries.VentilatorCheck check) =>
-        check.SpontaneousMinuteVolumeLMin is { } measured ? (double)measured
-        : check is { TotalMinuteVolumeLMin: { } total, ReleaseVolumeMl: { } volume }
-            ? Math.Max(0, (double)total - ((double)volume / 1000 * ReleaseCycle.Rate(settings.TimeHigh, settings.TimeLow).PerMinute))
-        : picture.Ongoing.Contains(Entries.EventKind.RelaxantStart) ? 0
-        : null;
 
     private static IEnumerable<FieldError> Missing(params (bool IsMissing, string What)[] needs) =>
         needs.Where(n => n.IsMissing).Select(n => new FieldError("", "missing", $"Needs {n.What} of the check that belongs to the gas."));

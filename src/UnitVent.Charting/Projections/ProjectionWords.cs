@@ -1,5 +1,6 @@
 using UnitVent.Charting.Entries;
 using UnitVent.Charting.Pictures;
+using UnitVent.Charting.Rules.Timing;
 using UnitVent.Charting.Wording;
 using UnitVent.Physiology;
 
@@ -9,8 +10,7 @@ namespace UnitVent.Charting.Projections;
 internal static class ProjectionWords
 {
     private const double SmallestClaimMmHg = 5;
-    private const double AboveTarget = 25; // as for a release that ends early
-    private const double HighestWindow = 90;
+    private const double HighestReadable = 90; // above it the projection itself refuses
 
     public static string Of(ProjectionRefusal refusal) => refusal switch
     {
@@ -38,10 +38,12 @@ internal static class ProjectionWords
             return null;
         }
 
-        var options = picture.Window.Unit.Thresholds.ReleasedLong;
-        var isFixed = picture.Method == SettingMethod.FixedRate;
-        var target = (double?)picture.Targets?.Body.EndReleaseFlowPercent ?? (isFixed ? options.FixedRateTarget : options.FlowGuidedTarget);
-        var (low, high) = (target - (isFixed ? options.FixedRateCautionBelow : options.FlowGuidedCautionBelow), Math.Min(HighestWindow, target + AboveTarget));
+        var (late, early) = (picture.Window.Unit.Thresholds.ReleasedLong, picture.Window.Unit.Thresholds.ReleasedShort);
+        var (below, above) = picture.Method == SettingMethod.FixedRate
+            ? (late.FixedRateCautionBelow, early.FixedRateAbove)
+            : (late.FlowGuidedCautionBelow, early.FlowGuidedAbove);
+        var target = EndFlowTarget.Percent(picture);
+        var (low, high) = (target - below, Math.Min(HighestReadable, target + above));
         return percent < low || percent > high
             ? $"The release would end at {Numbers.Fixed(percent)} % of peak, outside this patient's {Numbers.Fixed(low)}–{Numbers.Fixed(high)} %."
             : null;

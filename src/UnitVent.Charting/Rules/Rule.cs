@@ -25,6 +25,12 @@ public abstract class Rule
     /// <summary>Gets whether it rests on a setting: said once and, when somebody has seen it, quiet until the setting changes or 12 h pass.</summary>
     public virtual bool SaidOnce => false;
 
+    /// <summary>Gets the family whose card it joins while that one is open, since it explains it; null when it always stands on its own family's.</summary>
+    public virtual Family? Joins => null;
+
+    /// <summary>Gets whether it leaves the cards while a caution or urgent finding is open.</summary>
+    public virtual bool OnlyWithoutCaution => false;
+
     /// <summary>Gets whether it stays quiet while the patient is off the ventilator, in transport or in theatre.</summary>
     public virtual bool QuietOffUnit => false;
 

@@ -12,6 +12,9 @@ namespace UnitVent.Charting.Windows;
 /// </remarks>
 public sealed class ChartWindow
 {
+    /// <summary>How far back a window holds every entry.</summary>
+    public static readonly Duration Span = Duration.FromHours(48);
+
     private readonly Dictionary<EntryKind, List<ChartEntry>> byKind;
 
     /// <summary>Makes a window.</summary>

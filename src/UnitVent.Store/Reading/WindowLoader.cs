@@ -15,9 +15,6 @@ namespace UnitVent.Store.Reading;
 /// <summary>Loads the windows that pictures are computed from.</summary>
 internal static class WindowLoader
 {
-    /// <summary>How far back a window holds every entry.</summary>
-    public static readonly Duration Span = Duration.FromHours(48);
-
     // Per episode: everything of the span; states (context, targets, phase, method, events, follow-ups) however old; the last of every other kind before.
     internal const string EntriesSql = """
         select e.*
@@ -65,7 +62,7 @@ internal static class WindowLoader
     {
         var profile = await ProfileAsync(db, unitId, to, cancellationToken);
         var episodes = await EpisodesAsync(db, unitId, e => e.EndedAt == null || e.EndedAt > from, cancellationToken);
-        return await WindowsAsync(db, profile, episodes, to, from - Span, cancellationToken);
+        return await WindowsAsync(db, profile, episodes, to, from - ChartWindow.Span, cancellationToken);
     }
 
     /// <summary>The windows of some episodes of a unit.</summary>
@@ -125,7 +122,7 @@ internal static class WindowLoader
         UnitVentDbContext db, UnitProfile profile, List<EpisodeFacts> episodes, Instant now, Instant? since, CancellationToken cancellationToken)
     {
         var ids = episodes.Select(e => e.Id).ToArray();
-        var rows = await EntriesAsync(db, profile.Id, ids, since ?? now - Span, now, cancellationToken);
+        var rows = await EntriesAsync(db, profile.Id, ids, since ?? now - ChartWindow.Span, now, cancellationToken);
         var steps = await StepsAsync(db, profile.Id, rows.Where(e => e.Kind == EntryKind.FollowUp).Select(e => e.Id).ToArray(), now, cancellationToken);
         var entries = rows.Select(r => Reassigned(r.ToEntry(), steps[r.Id])).ToLookup(e => e.EpisodeId);
         var closed = steps.SelectMany(s => s).Where(s => s.Step != FollowUpStep.Reassigned).ToDictionary(s => s.FollowUpId, s => s.Step);

@@ -118,7 +118,7 @@ internal static class RecordingEntries
         await db.SaveChangesAsync(cancellationToken);
 
         var recorded = rows.ConvertAll(r => r.ToEntry());
-        var later = recorded.TrueForAll(e => e.Corrects is null && e.EffectiveAt > now - WindowLoader.Span)
+        var later = recorded.TrueForAll(e => e.Corrects is null && e.EffectiveAt > now - ChartWindow.Span)
             ? window.With(recorded)
             : await WindowLoader.OfLockedAsync(db, new Place(episode.UnitId, episode.Id), now, cancellationToken);
         var (before, after) = (PatientPicture.At(window, now), PatientPicture.At(later, now));

@@ -126,7 +126,7 @@ public sealed class ThresholdDesk
             {
                 v.Chosen,
                 From = v.NeedsSecond
-                    ? db.ThresholdAnswers.Where(a => a.UnitId == unitId && a.VersionId == v.Id && a.Agrees).Select(a => (Instant?)a.At).FirstOrDefault()
+                    ? db.ThresholdAnswers.Where(a => a.UnitId == unitId && a.VersionId == v.Id && a.Agrees).OrderBy(a => a.At).Select(a => (Instant?)a.At).FirstOrDefault()
                     : v.At,
             })
             .Where(v => v.From <= at)

@@ -1,6 +1,7 @@
 using Microsoft.EntityFrameworkCore;
 using NodaTime;
 using Npgsql;
+using UnitVent.Charting.Windows;
 using UnitVent.Store.Reading;
 using UnitVent.Store.Schema;
 
@@ -39,7 +40,7 @@ public sealed class PlanTests(TestStore store) : IClassFixture<TestStore>
         command.CommandText = "explain " + System.Text.RegularExpressions.Regex.Replace(WindowLoader.EntriesSql, @"\{(\d)\}", m => "$" + (m.Groups[1].Value[0] - '0' + 1));
         command.Parameters.Add(new() { Value = store.UnitId });
         command.Parameters.Add(new() { Value = new[] { episode } });
-        command.Parameters.Add(new() { Value = now - WindowLoader.Span });
+        command.Parameters.Add(new() { Value = now - ChartWindow.Span });
         command.Parameters.Add(new() { Value = now });
         await using var reader = await command.ExecuteReaderAsync(TestStore.Cancel);
         var lines = new List<string>();

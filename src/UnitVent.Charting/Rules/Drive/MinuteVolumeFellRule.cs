@@ -19,6 +19,9 @@ public sealed class MinuteVolumeFellRule : Rule
     public override string Seen => "minute volume fell at the same settings";
 
     /// <inheritdoc/>
+    public override Family? Joins => Family.CarbonDioxide;
+
+    /// <inheritdoc/>
     public override string Levels => "30 % under the highest of the checks of the last 9 h caution";
 
     /// <inheritdoc/>

@@ -19,6 +19,9 @@ public sealed class TrialScreenRule : Rule
     public override string Seen => "recorded values meet the unit’s trial screen";
 
     /// <inheritdoc/>
+    public override bool OnlyWithoutCaution => true;
+
+    /// <inheritdoc/>
     public override string Levels => "information, until noon on a day without a trial";
 
     /// <inheritdoc/>

@@ -19,6 +19,9 @@ public sealed class CpapLevelRule : Rule
     public override string Seen => "recorded values match the unit’s CPAP-level criteria";
 
     /// <inheritdoc/>
+    public override bool OnlyWithoutCaution => true;
+
+    /// <inheritdoc/>
     public override string Levels => "P high up to 15 cmH2O, T high from 10 s, FiO2 up to 0.40, own share from 80 %, for 4 h: information";
 
     /// <inheritdoc/>

@@ -20,6 +20,9 @@ public sealed class ReleasedLongRule : Rule
     public override string Seen => "released long: end-release flow low, % of peak";
 
     /// <inheritdoc/>
+    public override Family? Joins => Family.Collapse;
+
+    /// <inheritdoc/>
     public override string Levels => "fixed rate: 5 points under the target caution, under the target twice advisory; flow-guided: 15 points caution, 10 points twice advisory; under the target and 10 points under the median of the drift window before, twice, caution; under 25 % urgent when P low is under 5 cmH2O";
 
     /// <inheritdoc/>

@@ -19,6 +19,9 @@ public sealed class ReleasedShortRule : Rule
     public override string Seen => "released short: end-release flow high, % of peak";
 
     /// <inheritdoc/>
+    public override Family? Joins => Family.Airway;
+
+    /// <inheritdoc/>
     public override string Levels => "over 75 % (flow-guided 90 %) with pH under 7.30, PaCO2 rising or release under 3 mL/kg advisory; with pH under 7.25 caution";
 
     /// <inheritdoc/>
