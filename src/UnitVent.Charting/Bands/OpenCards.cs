@@ -13,7 +13,7 @@ internal static class OpenCards
     public static List<Card> Of(IReadOnlyList<Flag> open)
     {
         var alarming = open.Any(f => f.Finding.Severity >= Severity.Caution);
-        var said = open.Where(f => !f.IsHeard && !IsDueListOnly(f.Finding) && !(alarming && RuleSet.Of(f.Finding.Rule).OnlyWithoutCaution)).ToList();
+        var said = open.Where(f => !f.IsHeard && !IsDueListOnly(f.Finding) && !(alarming && RuleSet.Find(f.Finding.Rule) is { OnlyWithoutCaution: true })).ToList();
         return [.. said
             .GroupBy(f => FamilyOf(f.Finding, said))
             .Select(g => new Card(g.Key, [.. g.OrderByDescending(f => f.Finding.Severity).ThenByDescending(f => f.Finding.SeenAt)]))
@@ -25,7 +25,7 @@ internal static class OpenCards
     /// <summary>A sudden change takes in what the same check shows; else a finding joins the card of what it explains.</summary>
     private static Family FamilyOf(Finding finding, List<Flag> open) =>
         ExplainedBySuddenChange.Contains(finding.Family) && open.Any(f => f.Finding.Family == Family.Sudden && OnSameEntry(f.Finding, finding)) ? Family.Sudden
-        : RuleSet.Of(finding.Rule).Joins is { } explained && open.Any(f => f.Finding.Family == explained) ? explained
+        : RuleSet.Find(finding.Rule)?.Joins is { } explained && open.Any(f => f.Finding.Family == explained) ? explained
         : finding.Family;
 
     private static bool IsDueListOnly(Finding finding) => finding is { Family: Family.Due, Severity: Severity.Information };

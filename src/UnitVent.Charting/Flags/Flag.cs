@@ -22,7 +22,7 @@ public sealed record Flag(Guid Id, Guid EpisodeId, Finding Finding, Instant Sinc
     public Acknowledgement? InHand { get; init; }
 
     /// <summary>Gets whether it rests on a setting and somebody has heard of it: it leaves the cards until <see cref="ComesBackAt"/> or until the setting is another.</summary>
-    public bool IsHeard => InHand is not null && RuleSet.Of(Finding.Rule).SaidOnce;
+    public bool IsHeard => InHand is not null && RuleSet.Find(Finding.Rule) is { SaidOnce: true };
 
     /// <summary>Gets when it is open again though nothing changed: when its time in hand is over, or 12 h after somebody heard of what rests on a setting; null when nobody has it in hand.</summary>
     public Instant? ComesBackAt => InHand is not { } hand ? null : IsHeard ? Instant.Max(hand.Until, hand.At + QuietFor) : hand.Until;

@@ -76,7 +76,12 @@ public static class RuleSet
         new TimeConstantRisingRule(),
     ];
 
+    private static Dictionary<string, Rule> ById => field ??= All.ToDictionary(r => r.Id);
+
+    /// <summary>The rule with an id; null for one that was dropped since it raised a flag.</summary>
+    public static Rule? Find(string id) => ById.GetValueOrDefault(id);
+
     /// <summary>The rule with an id.</summary>
-    /// <exception cref="InvalidOperationException">There is none.</exception>
-    public static Rule Of(string id) => All.First(r => r.Id == id);
+    /// <exception cref="KeyNotFoundException">There is none.</exception>
+    public static Rule Of(string id) => ById[id];
 }
